@@ -1,0 +1,4 @@
+export * from "./codes.ts";
+export * from "./variant.ts";
+export * from "./profile.ts";
+export * from "./stages.ts";
