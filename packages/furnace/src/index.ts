@@ -1,4 +1,5 @@
 export * from "./codes.ts";
 export * from "./variant.ts";
+export * from "./parse-variant.ts";
 export * from "./profile.ts";
 export * from "./stages.ts";

@@ -1,1 +1,2 @@
-export {};
+export * from "./document.ts";
+export * from "./walk-tree.ts";
