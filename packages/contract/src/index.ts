@@ -1,1 +1,16 @@
-export {};
+export * from "./error-codes.ts";
+export * from "./limits.ts";
+export * from "./problem.ts";
+export * from "./roles.ts";
+export * from "./route-contract.ts";
+export * from "./route-contracts.ts";
+export * from "./routes/auth.ts";
+export * from "./routes/company.ts";
+export * from "./routes/customers.ts";
+export * from "./routes/diagnoses.ts";
+export * from "./routes/people.ts";
+export * from "./routes/reports.ts";
+export * from "./routes/system.ts";
+export * from "./routes/trees.ts";
+export * from "./routes/units.ts";
+export * from "./schemas/fields.ts";
