@@ -6,3 +6,4 @@ export * from "./state/diagnosis-state.ts";
 export * from "./state/evolve.ts";
 export * from "./derive/ladder.ts";
 export * from "./derive/rung-of-device.ts";
+export * from "./derive/tree-position.ts";

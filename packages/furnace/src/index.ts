@@ -6,3 +6,6 @@ export * from "./stages.ts";
 export * from "./timings.ts";
 export * from "./sights.ts";
 export * from "./contact-voltage.ts";
+export * from "./sequence/sequence-types.ts";
+export * from "./sequence/direct-ignition.ts";
+export * from "./sequence/create-sequence.ts";
