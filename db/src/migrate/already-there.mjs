@@ -3,7 +3,7 @@
  * itself, and since 10.6 each one happens whole or not at all, so these answers to a statement that was started
  * and never recorded as finished mean: it had succeeded.
  *
- * Numbers: MariaDB error code reference, from memory; each but 1051 and 1091 is provoked by a test.
+ * Numbers: MariaDB error code reference, from memory; a test that kills a migration provokes them.
  */
 const alwaysDone = new Set([
   1050, // table exists
