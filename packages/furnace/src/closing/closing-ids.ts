@@ -1,0 +1,26 @@
+/** The checks that prove a unit safe to leave. Common practice. */
+export const CLOSING_CHECK_IDS = [
+  "close-cycles",
+  "close-flame",
+  "close-cycle-end",
+  "close-room-co",
+  "close-panels",
+  "close-tstat",
+  "close-jumpers",
+  "close-docs",
+  "close-leak-up",
+  "close-leak-down",
+  "close-restore",
+  "close-inlet-static",
+  "close-inlet-run",
+  "close-manifold",
+  "close-input",
+  "close-rise",
+  "close-sensor",
+  "close-co",
+  "close-draft",
+  "close-draft-opens",
+  "close-safeties",
+  "close-cold",
+] as const;
+export type ClosingCheckId = (typeof CLOSING_CHECK_IDS)[number];

@@ -1,0 +1,376 @@
+import { all, and, ign, loc, ctl, fuel, opt, sev } from "../variant.ts";
+import type { FaultId } from "./fault-ids.ts";
+import type { FaultEntry } from "./fault-types.ts";
+
+/** Faults of gas supply, valve, orifices and burners. Common practice; frequencies are judgement for US calls in the heating season. */
+export const gasFaults = {
+  "gas-off-appliance-valve": {
+    component: "appliance-valve",
+    applies: all,
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-gas-shutoff", findings: ["appliance-valve"] },
+      { check: "ck-inlet-pressure-static", findings: ["zero"] },
+      { check: "ck-other-appliances", findings: ["burn"] },
+    ],
+    repairs: ["open-appliance-valve"],
+    frequency: "C",
+    hazards: ["GAS"],
+    stopRules: ["found-off"],
+  },
+  "gas-off-after-summer": {
+    component: "branch-valve",
+    applies: loc("RTU"),
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-gas-shutoff", findings: ["branch-off-season"] },
+      { check: "ck-inlet-pressure-static", findings: ["zero"] },
+    ],
+    repairs: ["open-branch-valve"],
+    frequency: "C",
+    hazards: ["GAS"],
+    stopRules: ["found-off"],
+    closing: ["close-restore"],
+  },
+  "gas-off-meter": {
+    component: "gas-meter",
+    applies: fuel("NG"),
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-gas-shutoff", findings: ["meter"] },
+      { check: "ck-other-appliances", findings: ["dead"] },
+    ],
+    repairs: ["call-gas-utility"],
+    frequency: "C",
+    hazards: ["GAS"],
+    stopRules: ["found-off"],
+    closing: ["close-restore"],
+  },
+  "gas-service-failed": {
+    component: "gas-service",
+    applies: fuel("NG"),
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-inlet-pressure-static", findings: ["zero", "zero-cocks-open"] },
+      { check: "ck-other-appliances", findings: ["dead"] },
+      { check: "ck-regulator-vent", findings: ["no-outlet"] },
+    ],
+    repairs: ["call-gas-utility"],
+    frequency: "U",
+    hazards: ["GAS"],
+    closing: ["close-restore"],
+  },
+  "lp-tank-empty": {
+    component: "lp-tank",
+    applies: fuel("LP"),
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-lp-tank", findings: ["empty", "low"] },
+      { check: "ck-inlet-pressure-static", findings: ["zero", "sinking"] },
+    ],
+    repairs: ["fill-tank"],
+    frequency: "C",
+    hazards: ["GAS"],
+    stopRules: ["lp-empty"],
+    closing: ["close-restore"],
+  },
+  "lp-excess-flow-closed": {
+    component: "lp-tank",
+    applies: fuel("LP"),
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-lp-tank", findings: ["enough-no-pressure"] },
+      { check: "ck-inlet-pressure-static", findings: ["zero", "zero-cocks-open", "returns-slow-open"] },
+    ],
+    repairs: ["reset-excess-flow"],
+    frequency: "U",
+    hazards: ["GAS"],
+    closing: ["close-restore"],
+  },
+  "lp-regulator-frozen": {
+    component: "lp-regulator",
+    applies: fuel("LP"),
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: sev("full"), stages: ["ignition-source"] },
+      { when: sev("partial"), stages: ["lightoff"] },
+    ],
+    decisive: [
+      { check: "ck-regulator-vent", findings: ["iced", "blocked", "no-outlet"] },
+      { check: "ck-inlet-pressure-running", findings: ["unstable"] },
+    ],
+    repairs: ["replace-lp-regulator"],
+    frequency: "U",
+  },
+  "gas-line-air": {
+    component: "gas-piping",
+    applies: all,
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-inlet-pressure-static" },
+      { check: "ck-timing", findings: ["lights-on-later-try"] },
+    ],
+    repairs: ["purge-gas-line"],
+    frequency: "C",
+  },
+  "low-inlet-pressure": {
+    component: "gas-supply",
+    applies: all,
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties", "main-burner"] },
+      { when: sev("full"), stages: ["gas"] },
+      { when: sev("partial"), stages: ["lightoff"] },
+    ],
+    decisive: [
+      { check: "ck-inlet-pressure-running", findings: ["low"] },
+      { check: "ck-other-appliances", findings: ["weak"] },
+    ],
+    repairs: ["correct-supply-pressure"],
+    frequency: "C",
+  },
+  "gas-line-undersized": {
+    component: "gas-piping",
+    applies: all,
+    lastStage: [{ stages: ["main-burner", "blower-on"] }],
+    decisive: [
+      { check: "ck-inlet-pressure-static" },
+      { check: "ck-inlet-pressure-running", findings: ["drop-others"] },
+    ],
+    repairs: ["re-pipe-gas-line"],
+    frequency: "U",
+  },
+  "high-inlet-pressure": {
+    component: "gas-supply",
+    applies: all,
+    lastStage: [
+      { when: sev("full"), stages: ["ignition-source"] },
+      { when: sev("partial"), stages: ["blower-on"] },
+    ],
+    decisive: [{ check: "ck-inlet-pressure-static", findings: ["high", "creeping"] }],
+    repairs: ["correct-supply-pressure"],
+    frequency: "U",
+    hazards: ["GAS"],
+  },
+  "gas-valve-switch-off": {
+    component: "gas-valve",
+    applies: all,
+    lastStage: [
+      { when: ign("SP"), stages: ["safeties", "ignition-source"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [{ check: "ck-gas-shutoff", findings: ["control-switch-off"] }],
+    repairs: ["set-gas-knob"],
+    frequency: "C",
+    hazards: ["GAS"],
+    stopRules: ["found-off"],
+  },
+  "gas-valve-coil-open": {
+    component: "gas-valve",
+    applies: ctl.not("VMC"),
+    lastStage: [
+      { when: ign("IPS", "IPH"), stages: ["ignition-source", "flame-proved"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-main-valve-voltage", findings: ["present-no-flow"] },
+      { check: "ck-pilot-valve-voltage", findings: ["present-no-pilot"] },
+      { check: "ck-valve-coil-ohms", findings: ["open"] },
+    ],
+    repairs: ["replace-gas-valve"],
+    frequency: "C",
+    hazards: ["GAS"],
+  },
+  "gas-valve-stuck-closed": {
+    component: "gas-valve",
+    applies: all,
+    lastStage: [
+      { when: ign("IPS", "IPH"), stages: ["ignition-source", "flame-proved"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-main-valve-voltage", findings: ["present-no-flow"] },
+      { check: "ck-pilot-valve-voltage", findings: ["present-no-pilot"] },
+      { check: "ck-manifold-pressure", findings: ["zero"] },
+    ],
+    repairs: ["replace-gas-valve"],
+    frequency: "C",
+    hazards: ["GAS"],
+  },
+  "gas-valve-wiring-open": {
+    component: "gas-valve-harness",
+    applies: ctl.not("VMC"),
+    lastStage: [
+      { when: ign("IPS", "IPH"), stages: ["ignition-source", "flame-proved"] },
+      { when: "else", stages: ["ignition-source"] },
+    ],
+    decisive: [
+      { check: "ck-main-valve-voltage", findings: ["board-yes-valve-no", "zero-at-valve"] },
+      { check: "ck-pilot-valve-voltage", findings: ["board-yes-valve-no"] },
+    ],
+    repairs: ["repair-valve-wire"],
+    frequency: "C",
+  },
+  "gas-valve-leak-by": {
+    component: "gas-valve",
+    applies: all,
+    lastStage: [
+      { when: sev("full"), stages: ["draft-rest"] },
+      { when: sev("partial"), stages: ["steady"] },
+    ],
+    decisive: [
+      { check: "ck-manifold-leakby", findings: ["passes", "rising"] },
+      { check: "ck-timing", findings: ["outlasts-call"] },
+    ],
+    repairs: ["replace-gas-valve"],
+    frequency: "R",
+    hazards: ["GAS"],
+    stopRules: ["leak-by"],
+    shutOff: true,
+  },
+  "manifold-low": {
+    component: "gas-valve",
+    applies: all,
+    lastStage: [
+      { when: sev("full"), stages: ["lightoff", "main-burner"] },
+      { when: sev("partial"), stages: ["blower-on"] },
+    ],
+    decisive: [{ check: "ck-manifold-pressure", findings: ["low-inlet-ok"] }],
+    repairs: ["adjust-manifold", "replace-gas-valve"],
+    frequency: "C",
+  },
+  "manifold-high": {
+    component: "gas-valve",
+    applies: all,
+    lastStage: [{ stages: ["blower-on"] }],
+    decisive: [{ check: "ck-manifold-pressure", findings: ["high"] }],
+    repairs: ["adjust-manifold", "replace-gas-valve"],
+    frequency: "U",
+    hazards: ["CO"],
+  },
+  "orifice-blocked-insects": {
+    component: "orifices",
+    applies: all,
+    lastStage: [
+      { when: ign("IPS", "IPH"), stages: ["flame-proved"] },
+      { when: sev("full"), stages: ["ignition-source"] },
+      { when: sev("partial"), stages: ["lightoff"] },
+    ],
+    decisive: [
+      { check: "ck-manifold-pressure", findings: ["holds-no-flame"] },
+      { check: "ck-burner-visual", findings: ["webs"] },
+      { check: "ck-orifice-size", findings: ["plugged"] },
+    ],
+    repairs: ["clean-orifices", "replace-orifices"],
+    frequency: "C",
+    hazards: ["GAS"],
+  },
+  "orifice-wrong": {
+    component: "orifices",
+    applies: all,
+    lastStage: [
+      { when: sev("partial"), stages: ["blower-on"] },
+      { when: and(ign("IPS", "IPH"), sev("full")), stages: ["flame-proved"] },
+      { when: sev("full"), stages: ["lightoff"] },
+    ],
+    decisive: [
+      { check: "ck-orifice-size", findings: ["wrong-size"] },
+      { check: "ck-meter-clock", findings: ["over", "under"] },
+    ],
+    repairs: ["replace-orifices"],
+    frequency: "U",
+    hazards: ["CO"],
+  },
+  "altitude-not-derated": {
+    component: "orifices",
+    applies: opt("altitude"),
+    lastStage: [{ stages: ["blower-on"] }],
+    decisive: [
+      { check: "ck-orifice-size", findings: ["wrong-altitude"] },
+      { check: "ck-flue-analysis", findings: ["low-o2"] },
+      { check: "ck-meter-clock", findings: ["over"] },
+    ],
+    repairs: ["derate-for-altitude"],
+    frequency: "U",
+    hazards: ["CO"],
+  },
+  "fuel-conversion-missing": {
+    component: "conversion-kit",
+    applies: all,
+    lastStage: [
+      { when: fuel("LP"), stages: ["main-burner", "blower-on"] },
+      { when: ign("SP"), stages: ["safeties", "main-burner"] },
+      { when: "else", stages: ["lightoff"] },
+    ],
+    decisive: [
+      { check: "ck-orifice-size", findings: ["wrong-fuel"] },
+      { check: "ck-flame-appearance", findings: ["huge-yellow", "tiny"] },
+      { check: "ck-manifold-pressure", findings: ["wrong-for-fuel"] },
+    ],
+    repairs: ["fit-conversion-kit"],
+    frequency: "R",
+    hazards: ["CO", "GAS"],
+    shutOff: true,
+  },
+  "burners-dirty": {
+    component: "burners",
+    applies: all,
+    lastStage: [
+      { when: and(ign("IPS", "IPH"), sev("full")), stages: ["flame-proved"] },
+      { when: sev("full"), stages: ["gas"] },
+      { when: sev("partial"), stages: ["blower-on"] },
+    ],
+    decisive: [
+      { check: "ck-burner-visual", findings: ["lint-rust"] },
+      { check: "ck-timing", findings: ["late-light"] },
+      { check: "ck-flue-analysis", findings: ["co-high"] },
+    ],
+    repairs: ["clean-burners", "replace-burners"],
+    frequency: "C",
+  },
+  "burner-crossover": {
+    component: "burners",
+    applies: and(ign("HSI", "DSI"), opt("multi-burner")),
+    lastStage: [{ stages: ["lightoff"] }],
+    decisive: [
+      { check: "ck-crossover", findings: ["slow", "never"] },
+      { check: "ck-burner-visual", findings: ["crossover-slot"] },
+    ],
+    repairs: ["clean-crossover", "replace-burners"],
+    frequency: "C",
+  },
+  "burner-misaligned": {
+    component: "burners",
+    applies: all,
+    lastStage: [
+      { when: ign("IPS", "IPH"), stages: ["flame-proved", "main-burner"] },
+      { when: "else", stages: ["gas", "main-burner"] },
+    ],
+    decisive: [
+      { check: "ck-burner-visual", findings: ["misaligned"] },
+      { check: "ck-flame-appearance", findings: ["lifts"] },
+    ],
+    repairs: ["refit-burners"],
+    frequency: "U",
+  },
+} satisfies Partial<Record<FaultId, FaultEntry>>;

@@ -1,0 +1,180 @@
+import { all, and, or, draft, loc, opt, found } from "../variant.ts";
+import type { FaultId } from "./fault-ids.ts";
+import type { FaultEntry } from "./fault-types.ts";
+
+/** Faults of limits, rollout and spill switches. Common practice; frequencies are judgement for US calls in the heating season. */
+export const limitFaults = {
+  "limit-open-filter": {
+    component: "filter",
+    applies: all,
+    lastStage: [{ stages: ["blower-on"] }],
+    decisive: [
+      { check: "ck-filter", findings: ["loaded", "wrong-type"] },
+      { check: "ck-temp-rise", findings: ["high"] },
+      { check: "ck-limit-voltage", findings: ["open-hot"] },
+    ],
+    repairs: ["replace-filter"],
+    frequency: "VC",
+  },
+  "limit-open-dampers": {
+    component: "registers",
+    applies: all,
+    lastStage: [{ stages: ["blower-on"] }],
+    decisive: [
+      { check: "ck-tesp", findings: ["registers-shut", "supply-side"] },
+      { check: "ck-temp-rise", findings: ["high"] },
+    ],
+    repairs: ["open-registers"],
+    frequency: "C",
+  },
+  "limit-open-coil-plugged": {
+    component: "cooling-coil",
+    applies: opt("ac-coil"),
+    lastStage: [{ stages: ["blower-on"] }],
+    decisive: [
+      { check: "ck-coil-drop", findings: ["dirty", "iced"] },
+      { check: "ck-tesp", findings: ["supply-side"] },
+    ],
+    repairs: ["clean-coil"],
+    frequency: "U",
+  },
+  "limit-open-overfire": {
+    component: "gas-input",
+    applies: all,
+    lastStage: [{ stages: ["blower-on"] }],
+    decisive: [{ check: "ck-meter-clock", findings: ["over"] }, { check: "ck-manifold-pressure" }],
+    repairs: ["set-input", "replace-orifices"],
+    frequency: "U",
+    hazards: ["CO"],
+  },
+  "limit-failed-open": {
+    component: "limit",
+    applies: all,
+    lastStage: [{ stages: ["call"] }],
+    decisive: [{ check: "ck-limit-ohms", findings: ["open-cold", "resistive"] }],
+    repairs: ["replace-limit"],
+    frequency: "C",
+  },
+  "aux-limit-tripped": {
+    component: "aux-limit",
+    applies: or(loc("ATT"), opt("downflow")),
+    lastStage: [
+      { when: found("as-found"), stages: ["call"] },
+      { when: found("on-run"), stages: ["blower-on"] },
+    ],
+    decisive: [{ check: "ck-aux-limit", findings: ["tripped", "opens-hot"] }],
+    repairs: ["correct-reverse-heat", "replace-aux-limit"],
+    frequency: "U",
+  },
+  "rollout-blocked-flue": {
+    component: "vent",
+    applies: all,
+    lastStage: [
+      { when: found("as-found"), stages: ["call"] },
+      { when: found("on-run"), stages: ["main-burner", "blower-on"] },
+    ],
+    decisive: [
+      { check: "ck-rollout", findings: ["tripped"] },
+      { check: "ck-vent-inspect", findings: ["blocked"] },
+      { check: "ck-heat-exchanger", findings: ["soot", "plugged"] },
+      { check: "ck-flue-analysis", findings: ["co-high", "co-rising"] },
+    ],
+    repairs: ["clear-vent-after-rollout"],
+    frequency: "C",
+    hazards: ["CO"],
+    stopRules: ["rollout"],
+  },
+  "rollout-cracked-exchanger": {
+    component: "heat-exchanger",
+    applies: all,
+    lastStage: [
+      { when: found("as-found"), stages: ["call"] },
+      { when: found("on-run"), stages: ["blower-on"] },
+    ],
+    decisive: [
+      { check: "ck-flame-appearance", findings: ["blower-change"] },
+      { check: "ck-heat-exchanger", findings: ["crack"] },
+      { check: "ck-flue-analysis", findings: ["blower-change"] },
+    ],
+    repairs: ["tag-heat-exchanger", "replace-heat-exchanger"],
+    frequency: "U",
+    hazards: ["CO"],
+    stopRules: ["rollout", "exchanger"],
+    shutOff: true,
+  },
+  "rollout-dirty-burners": {
+    component: "burners",
+    applies: all,
+    lastStage: [
+      { when: found("as-found"), stages: ["call"] },
+      { when: found("on-run"), stages: ["main-burner"] },
+    ],
+    decisive: [
+      { check: "ck-burner-visual", findings: ["lint-rust"] },
+      { check: "ck-flame-appearance", findings: ["lazy-yellow", "rolls-out"] },
+      { check: "ck-flue-analysis", findings: ["co-high"] },
+    ],
+    repairs: ["clean-burners-after-rollout"],
+    frequency: "C",
+    stopRules: ["rollout"],
+  },
+  "rollout-low-inlet": {
+    component: "gas-supply",
+    applies: all,
+    lastStage: [
+      { when: found("as-found"), stages: ["call"] },
+      { when: found("on-run"), stages: ["gas", "main-burner"] },
+    ],
+    decisive: [
+      { check: "ck-inlet-pressure-running", findings: ["low"] },
+      { check: "ck-crossover", findings: ["slow"] },
+      { check: "ck-rollout", findings: ["tripped"] },
+    ],
+    repairs: ["correct-supply-after-rollout"],
+    frequency: "U",
+    stopRules: ["rollout"],
+  },
+  "rollout-failed-open": {
+    component: "rollout-switch",
+    applies: all,
+    lastStage: [{ stages: ["call"] }],
+    decisive: [{ check: "ck-rollout", findings: ["open-not-tripped"] }],
+    repairs: ["replace-rollout-switch"],
+    frequency: "R",
+    stopRules: ["rollout"],
+  },
+  "spill-tripped": {
+    component: "spill-switch",
+    applies: draft("ND"),
+    lastStage: [
+      { when: found("as-found"), stages: ["call"] },
+      { when: found("on-run"), stages: ["blower-on"] },
+    ],
+    decisive: [
+      { check: "ck-spill-switch", findings: ["tripped", "opens-hot"] },
+      { check: "ck-spillage", findings: ["always", "fans-on", "door-shut-only"] },
+      { check: "ck-draft", findings: ["positive", "positive-fans-on"] },
+      { check: "ck-vent-inspect", findings: ["blocked", "nest", "disconnected"] },
+    ],
+    repairs: ["clear-vent-after-spill", "move-exhaust-fan"],
+    frequency: "C",
+    hazards: ["CO"],
+    stopRules: ["spill"],
+  },
+  "vent-damper-stuck": {
+    component: "vent-damper",
+    applies: and(draft("ND"), opt("vent-damper")),
+    lastStage: [{ stages: ["safeties"] }],
+    decisive: [{ check: "ck-vent-damper", findings: ["shut", "end-switch-open"] }],
+    repairs: ["replace-vent-damper"],
+    frequency: "U",
+  },
+  "fusible-link-open": {
+    component: "thermal-link",
+    applies: opt("fusible-link"),
+    lastStage: [{ stages: ["call"] }],
+    decisive: [{ check: "ck-rollout", findings: ["link-open"] }],
+    repairs: ["replace-thermal-link"],
+    frequency: "R",
+  },
+} satisfies Partial<Record<FaultId, FaultEntry>>;
