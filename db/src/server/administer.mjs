@@ -49,7 +49,7 @@ export async function copyDatabase({ socket, from, to }) {
     "--skip-comments",
     from,
   ]);
-  if (dump.code !== 0) throw new PlainError(`MariaDB could not copy ${from}: ${dump.stderr.trim()}`);
+  if (dump.code !== 0) throw new PlainError(`MariaDB could not copy ${from}: ${readError(dump.stderr)}`);
   await administer({ socket, sql: `drop database if exists ${quoteName(to)}; ${createDatabaseSql(to)}` });
   await administer({ socket, sql: dump.stdout, database: to });
 }
@@ -85,4 +85,17 @@ export function quoteName(name) {
  */
 export function quoteText(text) {
   return `'${text.replaceAll("\\", "\\\\").replaceAll("'", "''")}'`;
+}
+
+/**
+ * The client prints the statement beside the reason; the statement may hold a password and is left out.
+ *
+ * @param {string} text
+ * @returns {string}
+ */
+function readError(text) {
+  const reasons = text
+    .split("\n")
+    .filter((line) => /\b(ERROR|error)\b/.test(line) && !/identified by/i.test(line));
+  return reasons.join(" ") || "no reason given";
 }
