@@ -145,7 +145,7 @@ describe("two migrations at the same time", () => {
       [1, 2, 3].map(async () => applyMigrations({ url: database.migratorUrl, folder: fixture })),
     );
     const total = results[0]?.total ?? 0;
-    expect(results.map((result) => result.applied).sort((a, b) => a - b)).toEqual([0, 0, total]);
+    expect(results.map((result) => result.applied).toSorted((a, b) => a - b)).toEqual([0, 0, total]);
   });
 
   test("gives up with a plain message when the other does not end, and takes over when its lease has run out", async () => {

@@ -34,6 +34,6 @@ function listFiles(root, path) {
   if (!statSync(full).isDirectory()) return [path];
   return readdirSync(full)
     .filter((name) => !ignored.has(name))
-    .sort()
+    .toSorted()
     .flatMap((name) => listFiles(root, join(path, name)));
 }

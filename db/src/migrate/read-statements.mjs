@@ -24,7 +24,7 @@ export function readStatements(folder) {
   if (!existsSync(folder)) throw new PlainError(`There is no folder of migrations at ${folder}.`);
   return readdirSync(folder)
     .filter((name) => name.endsWith(".sql"))
-    .sort()
+    .toSorted()
     .flatMap((file) =>
       readFileSync(join(folder, file), "utf8")
         .split(separator)
