@@ -137,6 +137,7 @@ export const airChecks = {
     ways: [
       { id: "co-air-free", opens: [] },
       { id: "oxygen", opens: [] },
+      { id: "oxygen-low-fire", opens: [] },
       { id: "oxygen-change", opens: [] },
     ],
   },
