@@ -228,7 +228,6 @@ describe("lint rules", () => {
     const messages = diagnostics
       .filter(({ filename }) => filename.endsWith(path))
       .map(({ message }) => message);
-    if (says === null) expect(messages).toEqual([]);
-    else expect(messages.join("\n")).toMatch(says);
+    expect(messages.join("\n")).toMatch(says ?? /^$/);
   });
 });
