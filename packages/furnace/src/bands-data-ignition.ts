@@ -121,7 +121,7 @@ export const ignitionBands: readonly Band[] = [
       GOOD,
       upTo(plate("sparkGapMaxIn", 0.13)),
       MARGINAL,
-      upTo(plus(plate("sparkGapMaxIn", 0.13), +0.02)),
+      upTo(plus(plate("sparkGapMaxIn", 0.13), 0.02)),
       FAIL,
     ),
   },

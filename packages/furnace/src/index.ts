@@ -33,3 +33,6 @@ export * from "./bands-types.ts";
 export * from "./bands.ts";
 export * from "./classify.ts";
 export * from "./classify-limits.ts";
+export * from "./closing/closing-checks.ts";
+export * from "./closing/closing-list.ts";
+export * from "./closing/closing-pass.ts";
