@@ -1,7 +1,7 @@
 /**
  * `npm test`: brings up what the tests need, runs every suite, and ends with `N passed, N failed`.
  *
- * `npm test -- --only unit,api` runs some of them.
+ * `npm test -- --only unit,api` runs some of them, `npm test -- --only e2e door` one file.
  */
 import { mkdirSync } from "node:fs";
 import { join } from "node:path";
@@ -29,7 +29,7 @@ for (const signal of /** @type {const} */ (["SIGINT", "SIGTERM", "SIGHUP"])) {
 }
 
 try {
-  const { stages, needsDatabase } = chooseSuites(process.argv.slice(2));
+  const { stages, needsDatabase, files } = chooseSuites(process.argv.slice(2));
   await reporter.step("dependencies", async (say) => ({
     value: undefined,
     note: await installDependencies({ root, shutdown, say }),
@@ -39,7 +39,7 @@ try {
   const databaseEnv = needsDatabase ? await openTestDatabase() : {};
   for (const lanes of stages) {
     await Promise.all(
-      lanes.map(async (lane) => runLane(lane, { root, resultsFolder, shutdown, databaseEnv })),
+      lanes.map(async (lane) => runLane(lane, { root, resultsFolder, shutdown, databaseEnv, files })),
     );
   }
 } catch (error) {

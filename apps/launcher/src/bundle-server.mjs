@@ -23,24 +23,29 @@ const { dependencies } = /** @type {{ dependencies: Record<string, string> }} */
 );
 const outside = Object.keys(dependencies).filter((name) => !name.startsWith("@emberladder/"));
 
-await build({
-  entryPoints: Object.fromEntries(
-    Object.entries(programs)
-      .map(([name, path]) => [name, join(root, path)])
-      .filter(([, path]) => existsSync(path ?? "")),
-  ),
-  outdir: process.argv[2] ?? join(apiFolder, "dist"),
-  outExtension: { ".js": ".mjs" },
-  bundle: true,
-  splitting: true,
-  platform: "node",
-  target: "node20",
-  format: "esm",
-  sourcemap: true,
-  logLevel: "error",
-  external: outside.flatMap((name) => [name, `${name}/*`]),
-  banner: {
-    // Libraries in the bundle that still call require() get one that works inside a module.
-    js: 'import { createRequire as createBundleRequire } from "node:module"; const require = createBundleRequire(import.meta.url);',
-  },
-});
+try {
+  await build({
+    entryPoints: Object.fromEntries(
+      Object.entries(programs)
+        .map(([name, path]) => [name, join(root, path)])
+        .filter(([, path]) => existsSync(path ?? "")),
+    ),
+    outdir: process.argv[2] ?? join(apiFolder, "dist"),
+    outExtension: { ".js": ".mjs" },
+    bundle: true,
+    splitting: true,
+    platform: "node",
+    target: "node20",
+    format: "esm",
+    sourcemap: true,
+    logLevel: "error",
+    external: outside.flatMap((name) => [name, `${name}/*`]),
+    banner: {
+      // Libraries in the bundle that still call require() get one that works inside a module.
+      js: 'import { createRequire as createBundleRequire } from "node:module"; const require = createBundleRequire(import.meta.url);',
+    },
+  });
+} catch {
+  // esbuild has printed file, line and reason already; its stack would say nothing more.
+  process.exitCode = 1;
+}

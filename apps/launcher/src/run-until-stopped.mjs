@@ -19,9 +19,10 @@ export async function runUntilStopped(start) {
   /** @param {number} code */
   const finish = async (code) => {
     if (shutdown.hasBegun()) return;
-    reporter.line("stop", "stopping everything that was started");
+    const hasWork = shutdown.hasWork();
+    if (hasWork) reporter.line("stop", "stopping everything that was started");
     await shutdown.run();
-    reporter.line("stop", "stopped; all data is kept");
+    if (hasWork) reporter.line("stop", "stopped; all data is kept");
     process.exit(code);
   };
   /** @param {unknown} error */

@@ -18,7 +18,7 @@ const server = await createServer({
     strictPort: true,
     // The Host header stays as the browser sent it, so that the server sees one origin.
     proxy: Object.fromEntries(
-      ["/api", "/health", "/dev/", "/r/"].map((path) => [path, { target, changeOrigin: false }]),
+      ["/api", "/health", "/dev"].map((path) => [path, { target, changeOrigin: false }]),
     ),
   },
 });

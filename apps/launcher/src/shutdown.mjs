@@ -11,6 +11,7 @@ export class StartCancelled extends Error {}
  * - `starting(promise)`: remembers something half started, so that the stop waits to learn how to end it
  * - `check()`: throws {@link StartCancelled} when the stop has begun
  * - `run()`: ends everything; every caller gets the same promise
+ * - `hasBegun()`, `hasWork()`: whether the stop has begun, whether there is anything to end
  *
  * @typedef {object} Shutdown
  * @property {(name: string, stop: () => Promise<void>) => void} add
@@ -18,6 +19,7 @@ export class StartCancelled extends Error {}
  * @property {() => void} check
  * @property {() => Promise<void>} run
  * @property {() => boolean} hasBegun
+ * @property {() => boolean} hasWork
  */
 
 /**
@@ -65,5 +67,6 @@ export function createShutdown(report) {
     },
     run: async () => (ending ??= endAll()),
     hasBegun: () => ending !== undefined,
+    hasWork: () => entries.length > 0 || pending.size > 0,
   };
 }

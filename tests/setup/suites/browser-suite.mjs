@@ -14,7 +14,7 @@ import { runSuiteCommand } from "./run-suite-command.mjs";
 /** Journeys in Chromium against the whole product. @type {import("./outcome.mjs").Suite} */
 export const browserSuite = {
   name: "e2e",
-  run: async ({ root, resultsFolder, shutdown }) => {
+  run: async ({ root, resultsFolder, shutdown, files }) => {
     const chromium = await ensureProgram({
       program: "chromium",
       packages: ["chromium"],
@@ -32,6 +32,7 @@ export const browserSuite = {
       args: [
         join(root, "tests/node_modules/@playwright/test/cli.js"),
         "test",
+        ...files,
         "--config=tests/e2e/playwright.config.ts",
         "--reporter=list,json",
       ],

@@ -10,10 +10,10 @@
  * @typedef {{ name: string, run: (context: SuiteContext) => Promise<Outcome> }} Suite
  *
  * What every suite may use: the repository's folder, a folder for its result files, the way to end what it
- * started, and environment variables that tell of the database.
+ * started, environment variables that tell of the database, and parts of file names to keep to (none: all).
  *
  * @typedef {{ root: string, resultsFolder: string, shutdown: import("../../../apps/launcher/src/shutdown.mjs").Shutdown,
- *   databaseEnv: Record<string, string> }} SuiteContext
+ *   databaseEnv: Record<string, string>, files: string[] }} SuiteContext
  */
 
 /**

@@ -32,17 +32,20 @@ const suitesWithDatabase = new Set(["api", "faults"]);
 /**
  * Chooses what to run.
  *
- * @param {string[]} args of the command line: nothing, or `--only` with names
- * @returns {{ stages: Suite[][][], needsDatabase: boolean }}
+ * @param {string[]} args of the command line: nothing, or `--only` with names, then parts of file names to which the
+ * chosen suites keep
+ * @returns {{ stages: Suite[][][], needsDatabase: boolean, files: string[] }}
  * @throws {PlainError} when a name is not known
  */
 export function chooseSuites(args) {
   const names = plan.flat(2).map((suite) => suite.name);
-  const [option, value] = args[0]?.includes("=") ? args[0].split("=") : args;
+  const [option, value = "", ...files] = args.flatMap((arg) =>
+    arg.startsWith("--only=") ? arg.split("=") : [arg],
+  );
   if (option !== undefined && option !== "--only") {
     throw new PlainError(`"${option}" is not an option. Use --only with some of: ${names.join(", ")}.`);
   }
-  const wanted = option === undefined ? names : (value ?? "").split(",").map((name) => name.trim());
+  const wanted = option === undefined ? names : value.split(",").map((name) => name.trim());
   const unknown = wanted.filter((name) => !names.includes(name));
   if (unknown.length > 0) {
     throw new PlainError(`There is no suite "${unknown.join(", ")}". The suites are: ${names.join(", ")}.`);
@@ -51,5 +54,5 @@ export function chooseSuites(args) {
     .map((lanes) => lanes.map((lane) => lane.filter((suite) => wanted.includes(suite.name))))
     .map((lanes) => lanes.filter((lane) => lane.length > 0))
     .filter((lanes) => lanes.length > 0);
-  return { stages, needsDatabase: wanted.some((name) => suitesWithDatabase.has(name)) };
+  return { stages, needsDatabase: wanted.some((name) => suitesWithDatabase.has(name)), files };
 }

@@ -20,7 +20,7 @@ import { runSuiteCommand } from "./run-suite-command.mjs";
 export function defineVitestSuite(name, projects) {
   return {
     name,
-    run: async ({ root, resultsFolder, shutdown, databaseEnv }) => {
+    run: async ({ root, resultsFolder, shutdown, databaseEnv, files }) => {
       const report = join(resultsFolder, `${name}.json`);
       const { output } = await runSuiteCommand(shutdown, {
         name,
@@ -28,6 +28,7 @@ export function defineVitestSuite(name, projects) {
           join(root, "tests/node_modules/vitest/vitest.mjs"),
           "run",
           "--config=tests/vitest.config.ts",
+          ...files,
           ...projects.map((project) => `--project=${project}`),
           "--reporter=default",
           "--reporter=json",
