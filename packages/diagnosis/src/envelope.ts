@@ -27,7 +27,10 @@ export const envelopeSchema = z.strictObject({
   deviceId: uuid,
   /** Gap-free count of this device over all its diagnoses, from 1. A gap shows a lost event. */
   deviceSeq: z.number().int().min(1).max(Number.MAX_SAFE_INTEGER),
-  type: z.string().regex(/^[a-z][a-z-]*\.[a-z][a-z-]*$/).max(64),
+  type: z
+    .string()
+    .regex(/^[a-z][a-z-]*\.[a-z][a-z-]*$/)
+    .max(64),
   schemaVersion: z.number().int().min(1).max(1000),
   body: z.record(z.string().max(64), z.unknown()),
   /** Device clock, UTC milliseconds. Recorded, never trusted for order. */

@@ -45,3 +45,4 @@ export * from "./rules/standing-pilot-steps.ts";
 export * from "./rules/stop-rule-types.ts";
 export * from "./rules/stop-rules.ts";
 export * from "./rules/stop-triggers.ts";
+export * from "./version.ts";

@@ -43,7 +43,10 @@ const asking = {
   check: z.string().regex(/^ck-[a-z0-9-]+$/),
   /** Where in the sequence it is taken; the catalogue's first stage where it is left out. */
   stage: z.enum(READING_STAGES).optional(),
-  way: z.string().regex(/^[a-z0-9-]+$/).optional(),
+  way: z
+    .string()
+    .regex(/^[a-z0-9-]+$/)
+    .optional(),
   branches: z.array(branchSchema).max(24),
   /** Where every answer goes that no branch takes. */
   otherwise: nodeId,
@@ -54,7 +57,20 @@ const asking = {
 export const nodeSchema = z.discriminatedUnion("kind", [
   z.strictObject({ kind: z.literal("check"), ...asking }),
   z.strictObject({ kind: z.literal("look"), ...asking }),
-  z.strictObject({ kind: z.literal("do"), ...common, act: z.string().trim().min(3).max(160), to: nodeId }),
+  z.strictObject({
+    kind: z.literal("do"),
+    ...common,
+    act: z.string().trim().min(3).max(160),
+    /** What the act changes on the unit: recorded with it, so that later readings have their state. */
+    sets: z
+      .strictObject({
+        power: z.enum(["on", "off"]).optional(),
+        gas: z.enum(["open", "shut"]).optional(),
+        calling: z.boolean().optional(),
+      })
+      .optional(),
+    to: nodeId,
+  }),
   z.strictObject({ kind: z.literal("conclude"), ...common, fault: z.string().regex(/^[a-z0-9-]+$/) }),
   z.strictObject({ kind: z.literal("go-to"), ...common, to: nodeId }),
   z.strictObject({

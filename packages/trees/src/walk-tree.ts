@@ -34,7 +34,10 @@ export function settleNode(tree: TreeDocument, id: string | undefined): TreeNode
  * Where a walk begins: at the part that answers a first-look item, else at the rung the unit stopped at
  * (`lastStage` is the last one completed), else at the entry for a unit that was not watched.
  */
-export function enterTree(tree: TreeDocument, at: { lastStage: LastStage; lookItem?: string }): TreeNode | undefined {
+export function enterTree(
+  tree: TreeDocument,
+  at: { lastStage: LastStage; lookItem?: string },
+): TreeNode | undefined {
   const key = at.lookItem && tree.entries[`look:${at.lookItem}`] ? `look:${at.lookItem}` : at.lastStage;
   return settleNode(tree, tree.entries[key] ?? tree.entries["any"]);
 }

@@ -1,4 +1,11 @@
-import { CLOSED_CONTACT_V, SIGHTS, STAGES, lastStageOfWatch, stageOfSight, stagesOf } from "@emberladder/furnace";
+import {
+  CLOSED_CONTACT_V,
+  SIGHTS,
+  STAGES,
+  lastStageOfWatch,
+  stageOfSight,
+  stagesOf,
+} from "@emberladder/furnace";
 import type { LastStage, ReadingUnit, Sight, Stage } from "@emberladder/furnace";
 import type { DiagnosisState, Observation, Watch } from "../state/diagnosis-state.ts";
 import { rungOfDevice } from "./rung-of-device.ts";
@@ -53,9 +60,15 @@ export function ladderOf(state: DiagnosisState): Rung[] {
     const seen = seenAt(watch, stage);
     const reading = newestReading(state, stage);
     const bypassed = state.putBacks.some(
-      (item) => item.kind === "jumper-fitted" && !item.restored && item.device && rungOfDevice(item.device) === stage,
+      (item) =>
+        item.kind === "jumper-fitted" && !item.restored && item.device && rungOfDevice(item.device) === stage,
     );
-    const base = { stage, number: index + 1, ...(seen === undefined ? {} : { atS: seen }), ...readingOf(reading) };
+    const base = {
+      stage,
+      number: index + 1,
+      ...(seen === undefined ? {} : { atS: seen }),
+      ...readingOf(reading),
+    };
     const stopped = watch !== undefined && !running && index === reached + 1 && last !== "satisfied";
     return {
       ...base,

@@ -1,5 +1,17 @@
 import { z } from "zod";
-import { checkId, eventId, noteRef, number, opening, outcome, readingValue, shown, slug, stage, unit } from "./fields.ts";
+import {
+  checkId,
+  eventId,
+  noteRef,
+  number,
+  opening,
+  outcome,
+  readingValue,
+  shown,
+  slug,
+  stage,
+  unit,
+} from "./fields.ts";
 
 /** Bodies of the events of checks, the tree and the conclusion, schema version 1. */
 export const checkEvents = {
@@ -53,7 +65,13 @@ export const checkEvents = {
     evidence: z.array(eventId).max(40),
     /** False where nothing was proven: the record says so and what is left to find out. */
     proven: z.boolean(),
-    rootCause: z.strictObject({ fault: slug.optional(), soughtAllClean: z.boolean().optional(), noteRef: noteRef.optional() }).optional(),
+    rootCause: z
+      .strictObject({
+        fault: slug.optional(),
+        soughtAllClean: z.boolean().optional(),
+        noteRef: noteRef.optional(),
+      })
+      .optional(),
     openQuestionRef: noteRef.optional(),
   }),
 };

@@ -1,17 +1,6 @@
 import { z } from "zod";
+import { TOUCH_ROWS } from "@emberladder/furnace";
 import { eventId, noteRef, number, opening, slug, unit } from "./fields.ts";
-
-export const TOUCH_ROWS = [
-  "setting",
-  "airflow",
-  "flame",
-  "draft",
-  "control",
-  "gas-joint",
-  "gas-train",
-  "safety",
-  "restored",
-] as const;
 
 export const OUTCOMES_OF_VISIT = ["fixed", "part-needed", "shut-off", "referred", "not-found"] as const;
 export type VisitOutcome = (typeof OUTCOMES_OF_VISIT)[number];
@@ -37,7 +26,11 @@ export const closingEvents = {
   /** Something opened by hand that no check opened. */
   "put-back.opened": opening,
   /** An entry of the put-back list is back. `of` is the event that opened it, `entry` its place in it. */
-  "put-back.restored": z.strictObject({ of: eventId, entry: z.number().int().min(0).max(7), powerWasOff: z.boolean().optional() }),
+  "put-back.restored": z.strictObject({
+    of: eventId,
+    entry: z.number().int().min(0).max(7),
+    powerWasOff: z.boolean().optional(),
+  }),
   /** A closing check of the light-off proof. */
   "proof.recorded": z.strictObject({
     closing: z.string().regex(/^close-[a-z]+(-[a-z]+)*$/),

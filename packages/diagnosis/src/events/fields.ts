@@ -1,9 +1,15 @@
 import { z } from "zod";
-import { OUTCOMES, READING_STAGES, READING_UNITS } from "@emberladder/furnace";
+import { OUTCOMES, PUT_BACK_KINDS, READING_STAGES, READING_UNITS } from "@emberladder/furnace";
 
 /** Fields that several event bodies share. Ids are checked for shape here and for sense by the rules. */
-export const slug = z.string().regex(/^[a-z0-9]+(-[a-z0-9]+)*$/).max(64);
-export const checkId = z.string().regex(/^ck-[a-z0-9]+(-[a-z0-9]+)*$/).max(64);
+export const slug = z
+  .string()
+  .regex(/^[a-z0-9]+(-[a-z0-9]+)*$/)
+  .max(64);
+export const checkId = z
+  .string()
+  .regex(/^ck-[a-z0-9]+(-[a-z0-9]+)*$/)
+  .max(64);
 export const eventId = z.uuid();
 /** Reference to a free text kept beside the event: SHA-256 of salt and text, see `noteHash`. */
 export const noteRef = z.string().regex(/^[0-9a-f]{64}$/);
@@ -33,23 +39,13 @@ export const shown = z.strictObject({
   bandUsed: z.string().max(200).optional(),
   unitState: unitState.optional(),
   /** The five likeliest causes in whole percent and the next checks, once they are computed. */
-  causes: z.array(z.strictObject({ fault: slug, percent: z.number().int().min(0).max(100) })).max(6).optional(),
+  causes: z
+    .array(z.strictObject({ fault: slug, percent: z.number().int().min(0).max(100) }))
+    .max(6)
+    .optional(),
   next: z.array(checkId).max(6).optional(),
   versions: z.strictObject({ catalogue: z.string().max(40), tree: z.string().max(80).optional() }).optional(),
 });
-
-export const PUT_BACK_KINDS = [
-  "cover-removed",
-  "gas-port-opened",
-  "gas-joint-opened",
-  "part-removed",
-  "tube-pulled",
-  "meter-in-series",
-  "lead-lifted",
-  "jumper-fitted",
-  "valve-closed",
-] as const;
-export type PutBackKind = (typeof PUT_BACK_KINDS)[number];
 
 /** One thing opened, lifted or fitted, which has to go back before the diagnosis can close. */
 export const opening = z.strictObject({
@@ -62,4 +58,4 @@ export const opening = z.strictObject({
   device: slug.optional(),
   limitS: seconds.optional(),
 });
-export type Opening = z.infer<typeof opening>;
+export type OpeningBody = z.infer<typeof opening>;

@@ -1,6 +1,16 @@
 import { z } from "zod";
 import { unitProfileSchema } from "@emberladder/furnace";
-import { checkId, GAS_STATES, number, noteRef, outcome, POWER_STATES, readingValue, seconds, slug } from "./fields.ts";
+import {
+  checkId,
+  GAS_STATES,
+  number,
+  noteRef,
+  outcome,
+  POWER_STATES,
+  readingValue,
+  seconds,
+  slug,
+} from "./fields.ts";
 
 /** Bodies of the events up to the end of the watch, schema version 1. */
 export const visitEvents = {
@@ -49,7 +59,10 @@ export const visitEvents = {
     noteRef: noteRef.optional(),
   }),
   /** Complaint and unit read and found right, or the unit corrected. */
-  "unit.confirmed": z.strictObject({ profile: unitProfileSchema.optional(), complaintRef: noteRef.optional() }),
+  "unit.confirmed": z.strictObject({
+    profile: unitProfileSchema.optional(),
+    complaintRef: noteRef.optional(),
+  }),
   /** The unit's own state changed by hand: power, gas, call for heat. */
   "unit-state.set": z.strictObject({
     power: z.enum(POWER_STATES).optional(),
@@ -81,7 +94,16 @@ export const visitEvents = {
   "watch.seen": z.strictObject({ sight: slug, atS: seconds }),
   /** How the watch ended. */
   "watch.ended": z.strictObject({
-    how: z.enum(["flame-lost", "no-flame", "no-glow", "nothing", "stopped", "locked-out", "limit-cut", "satisfied"]),
+    how: z.enum([
+      "flame-lost",
+      "no-flame",
+      "no-glow",
+      "nothing",
+      "stopped",
+      "locked-out",
+      "limit-cut",
+      "satisfied",
+    ]),
     atS: seconds,
     blowerWithInducer: z.boolean().optional(),
     tries: z.number().int().min(1).max(20).optional(),

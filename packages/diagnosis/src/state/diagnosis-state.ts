@@ -1,5 +1,5 @@
 import type { UnitProfile } from "@emberladder/furnace";
-import type { Opening, UnitState } from "../events/fields.ts";
+import type { OpeningBody, UnitState } from "../events/fields.ts";
 import type { BodyOf } from "../events/index.ts";
 import type { VisitOutcome } from "../events/closing-events.ts";
 
@@ -43,7 +43,7 @@ export interface Watch extends Trace {
 }
 
 /** One entry of the put-back list. */
-export interface PutBack extends Trace, Opening {
+export interface PutBack extends Trace, OpeningBody {
   /** Place in the event that opened it. */
   entry: number;
   /** The check that opened it, if one did. */

@@ -77,7 +77,11 @@ function apply(state: DiagnosisState, event: EventBody, trace: Trace): Diagnosis
       return {
         ...state,
         profile: event.body.profile ?? state.profile,
-        confirmed: { ...trace, complaintRef: event.body.complaintRef, changedUnit: event.body.profile !== undefined },
+        confirmed: {
+          ...trace,
+          complaintRef: event.body.complaintRef,
+          changedUnit: event.body.profile !== undefined,
+        },
       };
     case "unit-state.set":
       return setUnit(state, event.body);
@@ -97,17 +101,28 @@ function apply(state: DiagnosisState, event: EventBody, trace: Trace): Diagnosis
         seen: [...watch.seen, { ...event.body, eventId: trace.eventId }],
       }));
     case "watch.ended":
-      return withLastWatch(setUnit(state, { calling: event.body.how !== "no-glow" && event.body.how !== "stopped" }), (watch) => ({
-        ...watch,
-        ended: { ...event.body, ...trace },
-      }));
+      return withLastWatch(
+        setUnit(state, { calling: event.body.how !== "no-glow" && event.body.how !== "stopped" }),
+        (watch) => ({
+          ...watch,
+          ended: { ...event.body, ...trace },
+        }),
+      );
     case "watch.skipped":
       return { ...state, watchSkipped: { ...event.body, ...trace } };
     case "check.started":
       return {
         ...state,
         current: { ...trace, check: event.body.check, way: event.body.way, treeNode: event.body.treeNode },
-        putBacks: [...state.putBacks, ...event.body.opens.map((opening, entry): PutBack => ({ ...opening, ...trace, entry, check: event.body.check }))],
+        putBacks: [
+          ...state.putBacks,
+          ...event.body.opens.map((opening, entry): PutBack => ({
+            ...opening,
+            ...trace,
+            entry,
+            check: event.body.check,
+          })),
+        ],
       };
     case "check.answered":
       return answerCheck(state, event.body, trace);

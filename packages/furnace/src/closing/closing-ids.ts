@@ -24,3 +24,8 @@ export const CLOSING_CHECK_IDS = [
   "close-cold",
 ] as const;
 export type ClosingCheckId = (typeof CLOSING_CHECK_IDS)[number];
+
+/** Whether a text is the id of a closing check. */
+export function isClosingCheckId(id: string): id is ClosingCheckId {
+  return CLOSING_CHECK_IDS.some((known) => known === id);
+}

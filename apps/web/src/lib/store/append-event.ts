@@ -3,7 +3,7 @@ import type { EventBody, NoteText, UnhashedEnvelope } from "@emberladder/diagnos
 import { v7 as uuidv7 } from "uuid";
 import { localStore } from "./database.ts";
 import type { LocalEvent, LocalStore } from "./database.ts";
-import { readDevice } from "./device.ts";
+import { readDevice, writeDevice } from "./device.ts";
 
 export const APP_BUILD: string = import.meta.env["VITE_BUILD"] ?? "dev";
 
@@ -26,9 +26,9 @@ export async function appendEvents(input: {
   store?: LocalStore;
 }): Promise<LocalEvent[]> {
   const { diagnosisId, authorId, events, notes = [], store = localStore } = input;
-  const device = await readDevice(store);
   return store.transaction("rw", [store.events, store.outbox, store.notes, store.meta], async () => {
-    const counter = ((await store.meta.get("deviceSeq"))?.value as number | undefined) ?? 0;
+    const device = await readDevice(authorId, store);
+    if (!device) throw new Error("This browser has no device id yet; sign in first.");
     const own = await store.events.where("[diagnosisId+deviceId]").equals([diagnosisId, device.id]).toArray();
     const last = own.reduce<LocalEvent | undefined>((a, b) => (a && a.deviceSeq > b.deviceSeq ? a : b), undefined);
     const serverOffsetMs = ((await store.meta.get("serverOffsetMs"))?.value as number | undefined) ?? null;
@@ -38,7 +38,7 @@ export async function appendEvents(input: {
         id: uuidv7(),
         diagnosisId,
         deviceId: device.id,
-        deviceSeq: counter + index + 1,
+        deviceSeq: device.lastSeq + index + 1,
         type: event.type,
         schemaVersion: BODY_SCHEMA_VERSION,
         body: event.body as Record<string, unknown>,
@@ -58,7 +58,7 @@ export async function appendEvents(input: {
       sealed.map(({ id, deviceSeq, occurredAt }) => ({ id, diagnosisId, deviceSeq, authorId, addedAt: occurredAt })),
     );
     await store.notes.bulkPut(notes.map((note) => ({ ...note, diagnosisId })));
-    await store.meta.put({ key: "deviceSeq", value: counter + sealed.length });
+    await writeDevice(authorId, { ...device, lastSeq: device.lastSeq + sealed.length }, store);
     return sealed;
   });
 }

@@ -1,20 +1,41 @@
-import type { LocalStore } from "./database.ts";
 import { localStore } from "./database.ts";
+import type { LocalStore } from "./database.ts";
 
-/** What this browser is called in the record; made once and kept with the store it counts for. */
+/** This browser as one person uses it: its id in the record, and the last number it used there. */
 export interface Device {
   id: string;
+  lastSeq: number;
 }
 
-/** The id of this device. A store that was cleared starts a new device, so that its count stays gap-free. */
-export async function readDevice(store: LocalStore = localStore): Promise<Device> {
-  return store.transaction("rw", store.meta, async () => {
-    const known = await store.meta.get("deviceId");
-    if (known) return { id: known.value as string };
-    const id = crypto.randomUUID();
-    await store.meta.put({ key: "deviceId", value: id });
-    return { id };
-  });
+const keyOf = (personId: string) => `device:${personId}`;
+
+/** The device of a person on this browser; undefined before their first sign-in here. */
+export async function readDevice(personId: string, store: LocalStore = localStore): Promise<Device | undefined> {
+  return (await store.meta.get(keyOf(personId)))?.value as Device | undefined;
+}
+
+/** Keeps the device's last number; called inside the transaction that appends. */
+export async function writeDevice(personId: string, device: Device, store: LocalStore = localStore): Promise<void> {
+  await store.meta.put({ key: keyOf(personId), value: device });
+}
+
+/**
+ * Takes over the device id that the server gave at sign-in. A new id starts a new count, so that each
+ * device's numbers stay free of gaps.
+ */
+export async function rememberDevice(personId: string, deviceId: string): Promise<void> {
+  const known = await readDevice(personId);
+  if (known?.id !== deviceId) await writeDevice(personId, { id: deviceId, lastSeq: 0 });
+}
+
+/** The id to offer at the next sign-in: the one last used in this browser, if any. */
+export function lastDeviceId(): string | undefined {
+  return localStorage.getItem("emberladder.device") ?? undefined;
+}
+
+/** Remembers the id to offer at the next sign-in. */
+export function rememberLastDeviceId(deviceId: string): void {
+  localStorage.setItem("emberladder.device", deviceId);
 }
 
 /** A name for the list of devices, from what the browser says of itself. */

@@ -1,4 +1,4 @@
-import { MAX_BATCH_BYTES, MAX_BATCH_EVENTS, syncBatch } from "@emberladder/contract";
+import { MAX_BATCH_BYTES, MAX_BATCH_EVENTS, sendBatch } from "@emberladder/contract";
 import { ApiProblem, callApi } from "#lib/api-client.ts";
 import { localStore } from "./database.ts";
 import type { LocalEvent, OutboxRow } from "./database.ts";
@@ -86,13 +86,14 @@ async function sendOneBatch(): Promise<boolean> {
   const rows = ready.filter((row) => !blocked.has(row.diagnosisId)).slice(0, MAX_BATCH_EVENTS);
   if (rows.length === 0) return false;
   const batch = await takeBatch(rows);
-  const answer = await callApi(syncBatch, { body: batch });
-  const done = [...answer.accepted.map((item) => item.id), ...answer.duplicate];
+  const answer = await callApi(sendBatch, { body: batch });
+  const placed = [...answer.accepted, ...answer.duplicate];
+  const done = placed.map((item) => item.id);
   await localStore.transaction("rw", [localStore.events, localStore.outbox, localStore.meta], async () => {
     await localStore.outbox.bulkDelete(done);
-    for (const item of answer.accepted) await localStore.events.update(item.id, { serverSeq: item.serverSeq });
+    for (const item of placed) await localStore.events.update(item.id, { serverSeq: item.serverSeq });
     for (const item of answer.rejected) {
-      if (!item.retryable) {
+      if (!item.retryable && item.id) {
         await localStore.outbox.update(item.id, { problem: { code: item.code, detail: item.detail, at: Date.now() } });
       }
     }

@@ -1,0 +1,79 @@
+import type { Command, NoteText, Refusal } from "@emberladder/diagnosis";
+import { useCallback, useEffect, useMemo, useState, useSyncExternalStore } from "react";
+import { Outlet, useNavigate, useParams } from "react-router-dom";
+import { useTranslation } from "react-i18next";
+import { useMe } from "#lib/session.tsx";
+import { DiagnosisContext } from "./diagnosis-context.tsx";
+import type { DiagnosisWork } from "./diagnosis-context.tsx";
+import { loadDiagnosis } from "./load-diagnosis.ts";
+import type { LoadedDiagnosis } from "./load-diagnosis.ts";
+import { MissingDiagnosis } from "./parts/missing-diagnosis.tsx";
+import { pathOfNext } from "./walk-machine.ts";
+
+/** Opens a diagnosis from this phone, or from the server where this phone does not have it. */
+export function DiagnosisRoute() {
+  const { diagnosisId = "" } = useParams();
+  const me = useMe();
+  const { t } = useTranslation();
+  const [loaded, setLoaded] = useState<LoadedDiagnosis | "missing" | null>(null);
+  useEffect(() => {
+    let left = false;
+    setLoaded(null);
+    void loadDiagnosis(diagnosisId, me.person.id).then((result) => {
+      if (!left) setLoaded(result ?? "missing");
+    });
+    return () => {
+      left = true;
+    };
+  }, [diagnosisId, me.person.id]);
+  if (loaded === null) return <p className="p-6 text-field">{t("field.opening")}</p>;
+  if (loaded === "missing") return <MissingDiagnosis />;
+  return <OpenDiagnosis key={diagnosisId} loaded={loaded} />;
+}
+
+function OpenDiagnosis({ loaded }: { loaded: LoadedDiagnosis }) {
+  const { session, tree, call } = loaded;
+  const { diagnosisId } = session;
+  const state = useSyncExternalStore(session.subscribe, session.getState);
+  const [refusal, setRefusal] = useState<Refusal | null>(null);
+  const navigate = useNavigate();
+
+  const record = useCallback(
+    async (commands: readonly Command[], notes?: readonly NoteText[]) => {
+      const result = await session.record(commands, notes);
+      setRefusal(result.ok ? null : result.refusal);
+      return result.ok ? result.state : null;
+    },
+    [session],
+  );
+  const recordAndGoOn = useCallback(
+    async (commands: readonly Command[], notes?: readonly NoteText[]) => {
+      const next = await record(commands, notes);
+      if (next) await navigate(pathOfNext(diagnosisId, next, tree));
+    },
+    [record, navigate, diagnosisId, tree],
+  );
+  const { profile } = state;
+  const work = useMemo<DiagnosisWork | null>(
+    () =>
+      profile && {
+        diagnosisId,
+        state,
+        profile,
+        tree,
+        call,
+        record,
+        recordAndGoOn,
+        refusal,
+        clearRefusal: () => setRefusal(null),
+      },
+    [diagnosisId, state, profile, tree, call, record, recordAndGoOn, refusal],
+  );
+  if (!work) return <MissingDiagnosis />;
+  return (
+    <DiagnosisContext value={work}>
+      <Outlet />
+    </DiagnosisContext>
+  );
+}
+

@@ -1,0 +1,35 @@
+import type { DiagnosisState } from "@emberladder/diagnosis";
+import { openPutBacks } from "@emberladder/diagnosis";
+import { useTranslation } from "react-i18next";
+import { Link } from "react-router-dom";
+import { SavedChip } from "#components/ui/saved-chip.tsx";
+import { paths } from "#lib/paths.ts";
+
+/** Foot of every field screen: what is out, what is saved, and the way to the gas and CO acts in one tap. */
+export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: DiagnosisState }) {
+  const { t } = useTranslation();
+  const out = openPutBacks(state).length;
+  return (
+    <nav aria-label={t("dock.label")} className="grid h-15 shrink-0 grid-cols-3 border-t-3 border-ink bg-surface">
+      <Link
+        to={paths.diagnosis.putBack(diagnosisId)}
+        className="flex items-center justify-center gap-2 text-label leading-4.5 font-medium text-ink no-underline"
+        aria-label={t("dock.putBackLabel", { count: out })}
+      >
+        <span
+          className={`numeric grid size-7 place-items-center rounded border-2 ${out > 0 ? "border-ink bg-ink text-ground" : "border-rule"}`}
+        >
+          {out}
+        </span>
+        <span className="w-11">{t("dock.putBack")}</span>
+      </Link>
+      <SavedChip />
+      <Link
+        to={paths.diagnosis.safety(diagnosisId)}
+        className="grid place-items-center border-2 border-caution-edge bg-caution px-1 text-center text-label leading-4.5 font-semibold text-on-caution no-underline"
+      >
+        {t("dock.safety")}
+      </Link>
+    </nav>
+  );
+}

@@ -1,0 +1,68 @@
+import { ladderOf } from "@emberladder/diagnosis";
+import type { DiagnosisState } from "@emberladder/diagnosis";
+import type { Stage } from "@emberladder/furnace";
+import type { ReactNode } from "react";
+import { useTranslation } from "react-i18next";
+import { useNavigate } from "react-router-dom";
+import { LadderStrip } from "#components/ladder/ladder-strip.tsx";
+import { paths } from "#lib/paths.ts";
+import { FieldDock } from "./field-dock.tsx";
+import { FieldHeader } from "./field-header.tsx";
+
+/**
+ * The frame of every field screen: header, the ladder along one side, the question, the pinned act, the dock.
+ * The heading of the page is the question. `pinned` stays above the dock; a page that is read before it is
+ * answered leaves it out and puts its act at the end.
+ */
+export function FieldLayout({
+  diagnosisId,
+  state,
+  title,
+  subtitle,
+  notch,
+  door,
+  stopped,
+  strip = true,
+  pinned,
+  flush,
+  children,
+}: {
+  diagnosisId: string;
+  state: DiagnosisState;
+  title: string;
+  subtitle: string;
+  notch?: Stage;
+  door?: { answered: number; of: number };
+  stopped?: boolean;
+  /** Without the strip where the screen draws the ladder itself. */
+  strip?: boolean;
+  pinned?: ReactNode;
+  /** Drawn over the full width, directly under the header. */
+  flush?: ReactNode;
+  children: ReactNode;
+}) {
+  const { t } = useTranslation();
+  const navigate = useNavigate();
+  return (
+    <div className="flex h-dvh flex-col bg-ground">
+      <FieldHeader title={title} subtitle={subtitle} />
+      {flush}
+      <div className="flex min-h-0 grow">
+        {strip && (
+          <LadderStrip
+            rungs={ladderOf(state)}
+            notch={notch}
+            door={door}
+            stopped={stopped}
+            onOpen={() => void navigate(paths.diagnosis.ladder(diagnosisId))}
+          />
+        )}
+        <main className="flex min-w-0 grow flex-col overflow-y-auto" tabIndex={-1} aria-label={t("field.step")}>
+          <div className="mx-auto flex w-full max-w-[560px] grow flex-col gap-3 p-4">{children}</div>
+        </main>
+      </div>
+      {pinned && <div className="border-t-1 border-hair bg-ground px-4 py-2"><div className="mx-auto max-w-[560px]">{pinned}</div></div>}
+      <FieldDock diagnosisId={diagnosisId} state={state} />
+    </div>
+  );
+}
