@@ -15,7 +15,7 @@ export async function runSuiteCommand(shutdown, { name, args, cwd, env = {} }) {
   shutdown.check();
   const child = spawn(process.execPath, args, {
     cwd,
-    env: { ...process.env, ...env, FORCE_COLOR: "0" },
+    env: { ...process.env, ...env, FORCE_COLOR: undefined, NO_COLOR: "1" },
     detached: true,
     stdio: ["ignore", "pipe", "pipe"],
   });
