@@ -69,8 +69,8 @@ export const REJECTIONS = {
   "seq-conflict": { retryable: false },
   /** The diagnosis belongs to nobody in this company. */
   "unknown-diagnosis": { retryable: false },
-  /** A first event that does not open a diagnosis on a call and unit of this company. */
-  "not-opened": { retryable: false },
+  /** The diagnosis is not here, and this is not its opening on a call and unit of this company. */
+  "not-opened": { retryable: true },
   /** The device is not registered for this person, or was revoked. Register it, then send again. */
   "unknown-device": { retryable: true },
   /** An earlier event of the same diagnosis was refused; this one waits for it. */

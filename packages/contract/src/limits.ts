@@ -62,16 +62,16 @@ export const RATE_LIMITS = {
   session: { requests: 600, seconds: 60, by: "session", shared: false },
   /** Open doors without a session: resets, invitations, first run, report links. */
   door: { requests: 30, seconds: 60, by: "address", shared: true },
-  /** Attempts at a second factor within one session. */
-  factor: { requests: 10, seconds: 300, by: "session", shared: true },
+  /** Attempts of one person at a second factor or at the present password. */
+  factor: { requests: 10, seconds: 300, by: "person", shared: true },
   /** Mail that one person can cause. */
-  mail: { requests: 20, seconds: 3600, by: "session", shared: true },
+  mail: { requests: 60, seconds: 3600, by: "person", shared: true },
 } as const satisfies Record<string, RateLimit>;
 
 export interface RateLimit {
   requests: number;
   seconds: number;
-  by: "address" | "session";
+  by: "address" | "session" | "person";
   shared: boolean;
 }
 export type RateLimitName = keyof typeof RATE_LIMITS;

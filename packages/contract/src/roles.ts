@@ -47,7 +47,7 @@ export type Permission = keyof typeof PERMISSIONS;
 
 /** Whether a role has a permission. */
 export function can(role: Role, permission: Permission): boolean {
-  return (PERMISSIONS[permission] as readonly Role[]).includes(role);
+  return PERMISSIONS[permission].includes(role);
 }
 
 /** All permissions of a role, as `me` sends them to the client. */

@@ -95,13 +95,16 @@ export const setUpTwoStep = defineContract({
   path: "/api/auth/two-step/set-up",
   access: "session",
   tag,
-  summary: "A new secret for an authenticator. It counts only once confirmed with a code.",
+  summary:
+    "A new secret for an authenticator. It counts only once confirmed with a code. The password is asked for where codes are on already.",
+  body: z.strictObject({ password: passwordField.optional() }),
   answer: {
     kind: "json",
     status: 200,
     schema: z.strictObject({ secret: z.string(), uri: z.string() }),
   },
-  errors: ["wrong-state"],
+  errors: ["wrong-state", "wrong-password"],
+  limit: "factor",
 });
 
 export const recoveryCodesSchema = z.strictObject({ recoveryCodes: z.array(z.string()), me: meSchema });

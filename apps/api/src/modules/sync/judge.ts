@@ -1,0 +1,84 @@
+import { evolve, initialState, lastStageOf, parseBody } from "@emberladder/diagnosis";
+import type { BodyOf, DiagnosisState, Envelope, EventBody, RecordedEvent } from "@emberladder/diagnosis";
+
+/**
+ * All that the server asks the record's own rules. The rules never refuse here: what a technician did is
+ * kept, and what is against a rule is flagged.
+ */
+
+export type { DiagnosisState };
+export { initialState };
+
+/** A rule that an event is against. */
+export interface Breach {
+  rule: string;
+  params?: Record<string, string | number | boolean>;
+}
+
+/** An event's body as this build reads it. */
+export type ReadBody =
+  | { kind: "known"; event: EventBody }
+  /** A newer type or version: kept as it is. */
+  | { kind: "unknown" }
+  | { kind: "malformed"; detail: string };
+
+/** Reads the body of an event. */
+export function readEventBody({ type, schemaVersion, body }: Envelope): ReadBody {
+  const parsed = parseBody(type, schemaVersion, body);
+  if (!parsed.ok) {
+    const [issue] = parsed.issues;
+    return { kind: "malformed", detail: `${issue?.path ?? ""}: ${issue?.message ?? "not readable"}` };
+  }
+  return parsed.known ? { kind: "known", event: parsed.event } : { kind: "unknown" };
+}
+
+/** The body of an opening, or undefined for any other event. */
+export function readOpening(read: ReadBody): BodyOf<"diagnosis.opened"> | undefined {
+  return read.kind === "known" && read.event.type === "diagnosis.opened" ? read.event.body : undefined;
+}
+
+/** The state after one more event. */
+export function evolveState(
+  state: DiagnosisState,
+  event: Envelope,
+  stamp: { serverSeq: number; actorId: string },
+): DiagnosisState {
+  const recorded: RecordedEvent = {
+    id: event.id,
+    type: event.type,
+    schemaVersion: event.schemaVersion,
+    body: event.body,
+    occurredAt: event.occurredAt,
+    deviceId: event.deviceId,
+    deviceSeq: event.deviceSeq,
+    ...stamp,
+  };
+  return evolve(state, recorded);
+}
+
+/** The rules that an event is against in the state before it. */
+export function findBreaches(_state: DiagnosisState, read: ReadBody, _now: number): Breach[] {
+  return read.kind === "known" ? [] : [{ rule: "unknown-step" }];
+}
+
+/** What lists and jobs need to know of a state. */
+export interface Projection {
+  isClosed: boolean;
+  outcome: string | null;
+  closedAt: Date | null;
+  lastStage: string | null;
+  /** The closing asks for a report to the customer. */
+  wantsReport: boolean;
+}
+
+/** The columns of a diagnosis that follow from its events. */
+export function projectState(state: DiagnosisState): Projection {
+  const stage = lastStageOf(state);
+  return {
+    isClosed: state.closed !== null,
+    outcome: state.closed?.outcome ?? null,
+    closedAt: state.closed === null ? null : new Date(state.closed.at),
+    lastStage: stage === "any" ? null : stage,
+    wantsReport: state.closed !== null && state.report?.to === "customer",
+  };
+}

@@ -1,0 +1,210 @@
+import { calls, devices, diagnoses, eventFlags, events, noteTexts, units } from "@emberladder/db";
+import type { Queryable } from "@emberladder/db";
+import type { UnitProfile } from "@emberladder/furnace";
+import type { StoredEvent } from "@emberladder/diagnosis";
+import { and, asc, eq, gt, inArray, isNull, ne, or, sql } from "drizzle-orm";
+
+export type DiagnosisRow = typeof diagnoses.$inferSelect;
+export type EventRow = typeof events.$inferSelect;
+export type NoteRow = typeof noteTexts.$inferSelect;
+
+/** The head of a diagnosis, locked until the transaction ends: it gives out places without a gap. */
+export async function lockDiagnosis(db: Queryable, diagnosisId: string): Promise<DiagnosisRow | undefined> {
+  const [row] = await db.select().from(diagnoses).where(eq(diagnoses.id, diagnosisId)).for("update");
+  return row;
+}
+
+/** Whether a call and a unit are the company's. */
+export async function areOfCompany(
+  db: Queryable,
+  companyId: string,
+  { callId, unitId }: { callId: string; unitId: string },
+): Promise<boolean> {
+  const [[call], [unit]] = await Promise.all([
+    db
+      .select({ id: calls.id })
+      .from(calls)
+      .where(and(eq(calls.companyId, companyId), eq(calls.id, callId))),
+    db
+      .select({ id: units.id })
+      .from(units)
+      .where(and(eq(units.companyId, companyId), eq(units.id, unitId))),
+  ]);
+  return call !== undefined && unit !== undefined;
+}
+
+export async function insertDiagnosis(db: Queryable, row: typeof diagnoses.$inferInsert): Promise<void> {
+  await db.insert(diagnoses).values(row);
+}
+
+export async function updateDiagnosis(
+  db: Queryable,
+  diagnosisId: string,
+  change: Partial<typeof diagnoses.$inferInsert>,
+): Promise<void> {
+  await db.update(diagnoses).set(change).where(eq(diagnoses.id, diagnosisId));
+}
+
+export async function insertEvents(db: Queryable, rows: (typeof events.$inferInsert)[]): Promise<void> {
+  await db.insert(events).values(rows);
+}
+
+export async function insertFlags(db: Queryable, rows: (typeof eventFlags.$inferInsert)[]): Promise<void> {
+  if (rows.length > 0) await db.insert(eventFlags).values(rows);
+}
+
+export async function listFlagRules(db: Queryable, diagnosisId: string): Promise<string[]> {
+  const rows = await db
+    .select({ rule: eventFlags.rule })
+    .from(eventFlags)
+    .where(eq(eventFlags.diagnosisId, diagnosisId));
+  return rows.map(({ rule }) => rule);
+}
+
+/** Events that have one of some ids, or one of some devices' numbers. */
+export async function findKnownEvents(
+  db: Queryable,
+  wanted: readonly { id: string; deviceId: string; deviceSeq: number }[],
+) {
+  const columns = {
+    id: events.id,
+    hash: events.hash,
+    diagnosisId: events.diagnosisId,
+    serverSeq: events.serverSeq,
+    deviceId: events.deviceId,
+    deviceSeq: events.deviceSeq,
+  };
+  return db
+    .select(columns)
+    .from(events)
+    .where(
+      or(
+        inArray(
+          events.id,
+          wanted.map(({ id }) => id),
+        ),
+        ...wanted.map(({ deviceId, deviceSeq }) =>
+          and(eq(events.deviceId, deviceId), eq(events.deviceSeq, deviceSeq)),
+        ),
+      ),
+    );
+}
+
+/** The events of one diagnosis in their order. */
+export async function listEventsOf(db: Queryable, diagnosisId: string): Promise<EventRow[]> {
+  return db.select().from(events).where(eq(events.diagnosisId, diagnosisId)).orderBy(asc(events.serverSeq));
+}
+
+/** Events after some heads, at most `limit`. */
+export async function listEventsAfter(
+  db: Queryable,
+  companyId: string,
+  heads: readonly { diagnosisId: string; serverSeq: number }[],
+  limit: number,
+): Promise<EventRow[]> {
+  if (heads.length === 0) return [];
+  return db
+    .select()
+    .from(events)
+    .where(
+      and(
+        eq(events.companyId, companyId),
+        or(
+          ...heads.map(({ diagnosisId, serverSeq }) =>
+            and(eq(events.diagnosisId, diagnosisId), gt(events.serverSeq, serverSeq)),
+          ),
+        ),
+      ),
+    )
+    .orderBy(asc(events.diagnosisId), asc(events.serverSeq))
+    .limit(limit);
+}
+
+/** An event as it was received: from the text that was hashed, never from anything re-written. */
+export function readStoredEvent(row: EventRow): StoredEvent {
+  const envelope = JSON.parse(row.canonicalText) as Omit<StoredEvent, "hash">;
+  return {
+    ...envelope,
+    hash: row.hash,
+    serverSeq: row.serverSeq,
+    companyId: row.companyId,
+    actorId: row.actorId,
+    receivedAt: row.receivedAt.getTime(),
+    chainHash: row.chainHash,
+  };
+}
+
+/** Which of some devices are the person's and not revoked. */
+export async function listGoodDevices(
+  db: Queryable,
+  personId: string,
+  deviceIds: string[],
+): Promise<Set<string>> {
+  if (deviceIds.length === 0) return new Set();
+  const rows = await db
+    .select({ id: devices.id })
+    .from(devices)
+    .where(and(inArray(devices.id, deviceIds), eq(devices.personId, personId), isNull(devices.revokedAt)));
+  return new Set(rows.map(({ id }) => id));
+}
+
+/** Which of some diagnoses are the company's. */
+export async function listOwnDiagnoses(
+  db: Queryable,
+  companyId: string,
+  ids: string[],
+): Promise<Set<string>> {
+  if (ids.length === 0) return new Set();
+  const rows = await db
+    .select({ id: diagnoses.id })
+    .from(diagnoses)
+    .where(and(eq(diagnoses.companyId, companyId), inArray(diagnoses.id, ids)));
+  return new Set(rows.map(({ id }) => id));
+}
+
+/** Keeps texts; one that is there already, also an erased one, stays as it is. */
+export async function insertNotes(db: Queryable, rows: (typeof noteTexts.$inferInsert)[]): Promise<void> {
+  if (rows.length === 0) return;
+  await db
+    .insert(noteTexts)
+    .values(rows)
+    .onDuplicateKeyUpdate({ set: { hash: sql`${noteTexts.hash}` } });
+}
+
+export async function listNotesOf(
+  db: Queryable,
+  companyId: string,
+  diagnosisIds: string[],
+): Promise<NoteRow[]> {
+  if (diagnosisIds.length === 0) return [];
+  return db
+    .select()
+    .from(noteTexts)
+    .where(and(eq(noteTexts.companyId, companyId), inArray(noteTexts.diagnosisId, diagnosisIds)));
+}
+
+/** Moves a call with its diagnosis: under way while one is open, done once it is closed. */
+export async function moveCall(
+  db: Queryable,
+  callId: string,
+  status: "under-way" | "done",
+  doneAt: Date | null,
+): Promise<void> {
+  await db
+    .update(calls)
+    .set({ status, doneAt })
+    .where(and(eq(calls.id, callId), ne(calls.status, "cancelled")));
+}
+
+/** Puts a profile that was corrected on site in force. */
+export async function replaceProfile(
+  db: Queryable,
+  companyId: string,
+  unitId: string,
+  profile: UnitProfile,
+): Promise<void> {
+  await db
+    .update(units)
+    .set({ profile, version: sql`${units.version} + 1` })
+    .where(and(eq(units.companyId, companyId), eq(units.id, unitId)));
+}

@@ -1,0 +1,4 @@
+export * from "./client.ts";
+export * from "./schema/index.ts";
+export * from "./sealed-secret.ts";
+export * from "./transaction.ts";
