@@ -36,10 +36,13 @@ try {
   }));
   const resultsFolder = join(root, ".cache/test-results");
   mkdirSync(resultsFolder, { recursive: true });
-  const databaseEnv = needsDatabase ? await openTestDatabase() : {};
+  const { makeTestFolder } = await import("./setup/test-folder.mjs");
+  const folder = await makeTestFolder();
+  shutdown.add("the test folder", folder.remove);
+  const databaseEnv = needsDatabase ? await openTestDatabase(folder) : {};
   for (const lanes of stages) {
     await Promise.all(
-      lanes.map(async (lane) => runLane(lane, { root, resultsFolder, shutdown, databaseEnv, files })),
+      lanes.map(async (lane) => runLane(lane, { root, resultsFolder, folder, shutdown, databaseEnv, files })),
     );
   }
 } catch (error) {
@@ -95,12 +98,15 @@ function describeOutcome({ passed, failed, skipped }) {
   return `${passed} passed, ${failed} failed${skipped > 0 ? `, ${skipped} SKIPPED` : ""}`;
 }
 
-/** @returns {Promise<Record<string, string>>} */
-async function openTestDatabase() {
+/**
+ * @param {import("./setup/test-folder.mjs").TestFolder} folder
+ * @returns {Promise<Record<string, string>>}
+ */
+async function openTestDatabase(folder) {
   return reporter.step("database", async () => {
     const { startTestDatabase } = await import("./setup/test-database.mjs");
     const { facts } = await shutdown.starting(
-      startTestDatabase().then((started) => {
+      startTestDatabase(folder).then((started) => {
         shutdown.add("the test database", started.stop);
         return started;
       }),

@@ -1,5 +1,6 @@
 import type { TestProject } from "vitest/node";
 import { startTestDatabase, type TestDatabaseFacts } from "./test-database.mjs";
+import { makeTestFolder } from "./test-folder.mjs";
 
 declare module "vitest" {
   export interface ProvidedContext {
@@ -19,7 +20,16 @@ export default async function provideDatabase(project: TestProject): Promise<() 
     project.provide("testDatabase", JSON.parse(given) as TestDatabaseFacts);
     return async () => undefined;
   }
-  const { facts, stop } = await startTestDatabase();
-  project.provide("testDatabase", facts);
-  return stop;
+  const folder = await makeTestFolder();
+  try {
+    const { facts, stop } = await startTestDatabase(folder);
+    project.provide("testDatabase", facts);
+    return async () => {
+      await stop();
+      await folder.remove();
+    };
+  } catch (error) {
+    await folder.remove();
+    throw error;
+  }
 }

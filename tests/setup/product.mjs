@@ -23,20 +23,19 @@ import { makeTestFolder } from "./test-folder.mjs";
  */
 
 /**
- * Starts the product for tests. Everything is ended, and the folder removed, through `shutdown`.
+ * Starts the product for tests. Everything is ended through `shutdown`.
  *
- * @param {{ shutdown: Shutdown, reporter?: Reporter, port?: number, onFailure?: (error: Error) => void }} options
- * `port` defaults to any free one
+ * @param {{ folder: import("./test-folder.mjs").TestFolder, shutdown: Shutdown, reporter?: Reporter, port?: number,
+ *   onFailure?: (error: Error) => void }} options `port` defaults to any free one
  * @returns {Promise<TestProduct>}
  */
 export async function startTestProduct({
+  folder,
   shutdown,
   reporter = silentReporter,
   port,
   onFailure = () => undefined,
 }) {
-  const folder = await makeTestFolder();
-  shutdown.add("the test folder", async () => folder.remove());
   const ownPort = port ?? (await findFreePort());
   const origin = `http://127.0.0.1:${ownPort}`;
   const dataDir = join(folder.path, "demo");
@@ -68,8 +67,10 @@ export function describeTestProduct({ origin, accountsFile, mailDir, dataDir }) 
 
 if (process.argv[1] === fileURLToPath(import.meta.url)) {
   await runUntilStopped(async ({ shutdown, reporter, fail }) => {
+    const folder = await makeTestFolder();
+    shutdown.add("the test folder", folder.remove);
     const port = Number(process.env["PORT"] ?? 4390);
-    const product = await startTestProduct({ shutdown, reporter, port, onFailure: fail });
+    const product = await startTestProduct({ folder, shutdown, reporter, port, onFailure: fail });
     reporter.line("product", JSON.stringify(describeTestProduct(product)));
   });
 }

@@ -1,44 +1,36 @@
 import { join } from "node:path";
 import { applyMigrations } from "@emberladder/db/migrate";
 import { startDatabase } from "@emberladder/db/server";
-import { makeTestFolder } from "./test-folder.mjs";
+
+/** @typedef {import("./test-folder.mjs").TestFolder} TestFolder */
 
 /**
  * What a test process needs to know about the database server of its run.
  *
- * @typedef {{ socket: string, port: number, template: string, users: import("@emberladder/db/server").DatabaseUsers,
- *   folder: string }} TestDatabaseFacts
+ * @typedef {{ socket: string, port: number, template: string, users: import("@emberladder/db/server").DatabaseUsers
+ * }} TestDatabaseFacts
  */
 
 /**
- * Starts the one MariaDB of a test run in a temporary folder and migrates its template database, from which every
- * test worker gets a copy.
+ * Starts the one MariaDB of a test run and migrates its template database, from which every test worker gets a
+ * copy.
  *
- * @returns {Promise<{ facts: TestDatabaseFacts, stop: () => Promise<void> }>} `stop` also removes the folder
+ * @param {TestFolder} folder where its data goes
+ * @returns {Promise<{ facts: TestDatabaseFacts, stop: () => Promise<void> }>}
  */
-export async function startTestDatabase() {
-  const folder = await makeTestFolder();
+export async function startTestDatabase(folder) {
+  const database = await startDatabase({
+    dataDir: join(folder.path, "db"),
+    database: "emberladder",
+    sideDatabases: "emberladder\\_%",
+  });
   try {
-    const database = await startDatabase({
-      dataDir: join(folder.path, "db"),
-      database: "emberladder",
-      sideDatabases: "emberladder\\_%",
-    });
-    const stop = async () => {
-      await database.stop();
-      folder.remove();
-    };
-    try {
-      await applyMigrations({ url: database.migratorUrl });
-      await database.grantApplication();
-    } catch (error) {
-      await stop();
-      throw error;
-    }
-    const { socket, port, users } = database;
-    return { facts: { socket, port, users, template: database.database, folder: folder.path }, stop };
+    await applyMigrations({ url: database.migratorUrl });
+    await database.grantApplication();
   } catch (error) {
-    folder.remove();
+    await database.stop();
     throw error;
   }
+  const { socket, port, users } = database;
+  return { facts: { socket, port, users, template: database.database }, stop: database.stop };
 }

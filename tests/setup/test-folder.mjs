@@ -1,4 +1,4 @@
-import { mkdtempSync, readdirSync, rmSync } from "node:fs";
+import { mkdirSync, mkdtempSync, readdirSync, rmSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { endProcess, isRunning, markProcess, readJson, writePrivateJson } from "@emberladder/db/server";
@@ -8,16 +8,25 @@ import { endProcess, isRunning, markProcess, readJson, writePrivateJson } from "
 const prefix = "emberladder-test-";
 
 /**
- * Makes a folder for one test run in the system's temporary folder, and clears away those of runs that were
- * killed, with the database servers they left behind.
+ * The folder of one test run. `temporary` is for what the tests make themselves (TMPDIR); `remove` ends whatever
+ * database or server was left running in it, and deletes it.
  *
- * @returns {Promise<{ path: string, remove: () => void }>}
+ * @typedef {{ path: string, temporary: string, remove: () => Promise<void> }} TestFolder
+ */
+
+/**
+ * Makes a folder for one test run in the system's temporary folder, and clears away those of runs that were
+ * killed, with the servers they left behind.
+ *
+ * @returns {Promise<TestFolder>}
  */
 export async function makeTestFolder() {
   await clearAbandonedFolders();
   const path = mkdtempSync(join(tmpdir(), prefix));
   writePrivateJson(join(path, "owner.json"), markProcess(process.pid));
-  return { path, remove: () => rmSync(path, { recursive: true, force: true }) };
+  const temporary = join(path, "tmp");
+  mkdirSync(temporary);
+  return { path, temporary, remove: async () => clearFolder(path) };
 }
 
 async function clearAbandonedFolders() {
@@ -25,14 +34,19 @@ async function clearAbandonedFolders() {
     const path = join(tmpdir(), name);
     const owner = /** @type {ProcessMark | undefined} */ (readJson(join(path, "owner.json")));
     // Without a mark the folder is being made at this moment by another run.
-    if (owner === undefined || isRunning(owner)) continue;
-    for (const mark of findMarks(path)) await endProcess(mark);
-    rmSync(path, { recursive: true, force: true });
+    if (owner !== undefined && !isRunning(owner)) await clearFolder(path);
   }
 }
 
+/** @param {string} path */
+async function clearFolder(path) {
+  for (const mark of findMarks(path)) await endProcess(mark);
+  // A process that is just ending may still write; then the folder is not empty at the first attempt.
+  rmSync(path, { recursive: true, force: true, maxRetries: 10, retryDelay: 100 });
+}
+
 /**
- * The processes of an abandoned run, as its database and its launcher have written them down.
+ * The processes of a run, as its database and its launcher have written them down.
  *
  * @param {string} path
  * @returns {ProcessMark[]}

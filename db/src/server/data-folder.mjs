@@ -123,3 +123,14 @@ function makePrivateFolderFor(socket) {
   }
   chmodSync(path, 0o700);
 }
+
+/**
+ * Removes the socket's folder when it lies outside the data folder. Nothing else is ever in it.
+ *
+ * @param {DataFolder} folder
+ * @returns {void}
+ */
+export function removeSocketFolder(folder) {
+  const path = resolve(folder.socket, "..");
+  if (path !== folder.root) rmSync(path, { recursive: true, force: true });
+}

@@ -6,7 +6,7 @@
  */
 import { setTimeout as sleep } from "node:timers/promises";
 import { administer, copyDatabase } from "./administer.mjs";
-import { locateDataFolder, prepareDataFolder } from "./data-folder.mjs";
+import { locateDataFolder, prepareDataFolder, removeSocketFolder } from "./data-folder.mjs";
 import { ensureMariadb } from "./debian-packages.mjs";
 import { PlainError } from "./plain-error.mjs";
 import { findFreePort, isPortFree } from "./ports.mjs";
@@ -113,6 +113,7 @@ export async function startDatabase({
     isStopping = true;
     await endProcess(started.mark, { patienceMs: 60_000 });
     writePrivateJson(folder.settings, { port: started.port, users });
+    removeSocketFolder(folder);
   };
   try {
     const owner = markProcess(process.pid);

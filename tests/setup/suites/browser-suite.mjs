@@ -14,7 +14,7 @@ import { runSuiteCommand } from "./run-suite-command.mjs";
 /** Journeys in Chromium against the whole product. @type {import("./outcome.mjs").Suite} */
 export const browserSuite = {
   name: "e2e",
-  run: async ({ root, resultsFolder, shutdown, files }) => {
+  run: async ({ root, resultsFolder, folder, shutdown, files }) => {
     const chromium = await ensureProgram({
       program: "chromium",
       packages: ["chromium"],
@@ -23,6 +23,7 @@ export const browserSuite = {
     });
     let failure = "";
     const product = await startTestProduct({
+      folder,
       shutdown,
       onFailure: (error) => (failure = `\nThe product failed during the tests: ${error.message}\n`),
     });
@@ -37,6 +38,7 @@ export const browserSuite = {
         "--reporter=list,json",
       ],
       cwd: root,
+      folder,
       env: {
         ...describeTestProduct(product),
         CHROMIUM: chromium,

@@ -9,10 +9,11 @@
  *
  * @typedef {{ name: string, run: (context: SuiteContext) => Promise<Outcome> }} Suite
  *
- * What every suite may use: the repository's folder, a folder for its result files, the way to end what it
+ * What every suite may use: the repository's folder, a folder for its result files, the run's own folder, the way to end what it
  * started, environment variables that tell of the database, and parts of file names to keep to (none: all).
  *
- * @typedef {{ root: string, resultsFolder: string, shutdown: import("../../../apps/launcher/src/shutdown.mjs").Shutdown,
+ * @typedef {{ root: string, resultsFolder: string, folder: import("../test-folder.mjs").TestFolder,
+ *   shutdown: import("../../../apps/launcher/src/shutdown.mjs").Shutdown,
  *   databaseEnv: Record<string, string>, files: string[] }} SuiteContext
  */
 

@@ -8,14 +8,15 @@ const patienceMs = 11 * 60_000;
  * that an abandoned run or a hanging suite ends with everything it had started.
  *
  * @param {import("../../../apps/launcher/src/shutdown.mjs").Shutdown} shutdown
- * @param {{ name: string, args: string[], cwd: string, env?: Record<string, string> }} command `args` of node
+ * @param {{ name: string, args: string[], cwd: string, folder: import("../test-folder.mjs").TestFolder,
+ *   env?: Record<string, string> }} command `args` of node
  * @returns {Promise<{ code: number, output: string }>}
  */
-export async function runSuiteCommand(shutdown, { name, args, cwd, env = {} }) {
+export async function runSuiteCommand(shutdown, { name, args, cwd, folder, env = {} }) {
   shutdown.check();
   const child = spawn(process.execPath, args, {
     cwd,
-    env: { ...process.env, ...env, FORCE_COLOR: undefined, NO_COLOR: "1" },
+    env: { ...process.env, ...env, TMPDIR: folder.temporary, FORCE_COLOR: undefined, NO_COLOR: "1" },
     detached: true,
     stdio: ["ignore", "pipe", "pipe"],
   });

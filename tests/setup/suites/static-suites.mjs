@@ -14,8 +14,10 @@ import { runSuiteCommand } from "./run-suite-command.mjs";
 function defineCommandSuite(name, [script = "", ...args]) {
   return {
     name,
-    run: async ({ root, shutdown }) =>
-      countAsOne(await runSuiteCommand(shutdown, { name, args: [join(root, script), ...args], cwd: root })),
+    run: async ({ root, folder, shutdown }) =>
+      countAsOne(
+        await runSuiteCommand(shutdown, { name, args: [join(root, script), ...args], cwd: root, folder }),
+      ),
   };
 }
 

@@ -20,7 +20,7 @@ import { runSuiteCommand } from "./run-suite-command.mjs";
 export function defineVitestSuite(name, projects) {
   return {
     name,
-    run: async ({ root, resultsFolder, shutdown, databaseEnv, files }) => {
+    run: async ({ root, resultsFolder, folder, shutdown, databaseEnv, files }) => {
       const report = join(resultsFolder, `${name}.json`);
       const { output } = await runSuiteCommand(shutdown, {
         name,
@@ -35,6 +35,7 @@ export function defineVitestSuite(name, projects) {
           `--outputFile.json=${report}`,
         ],
         cwd: root,
+        folder,
         env: databaseEnv,
       });
       return readOutcome(/** @type {VitestReport | undefined} */ (readJson(report)), output);
