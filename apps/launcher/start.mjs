@@ -25,6 +25,7 @@ await runUntilStopped(async ({ shutdown, reporter, fail }) => {
     describeWelcome({
       mode: settings.mode,
       origin: apiOrigin,
+      publicOrigin: settings.publicOrigin,
       accounts,
       nowMs: Date.now(),
       logFolder: `${settings.dataDir}/logs`,

@@ -23,11 +23,13 @@ export function readAccounts(dataDir) {
 /**
  * Says where the product is and how to sign in.
  *
- * @param {{ mode: string, origin: string, accounts: DemoAccount[], nowMs: number, logFolder: string }} facts
+ * @param {{ mode: string, origin: string, publicOrigin?: string, accounts: DemoAccount[], nowMs: number, logFolder: string }} facts
  * @returns {string} several lines
  */
-export function describeWelcome({ mode, origin, accounts, nowMs, logFolder }) {
+export function describeWelcome({ mode, origin, publicOrigin = origin, accounts, nowMs, logFolder }) {
   const lines = ["", `Emberladder is ready: ${origin}`, ""];
+  if (publicOrigin !== origin)
+    lines.push(`People reach it at ${publicOrigin}, through the proxy in front of it.`, "");
   if (mode === "demo") {
     lines.push("Everything in it is invented. Sign in as:");
     const width = Math.max(0, ...accounts.map((account) => account.email.length));
