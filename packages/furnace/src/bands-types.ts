@@ -1,4 +1,5 @@
 import type { CheckId } from "./checks/check-ids.ts";
+import type { WayId } from "./checks/check-types.ts";
 import type { ReadingUnit } from "./codes.ts";
 import type { Chain, PlateFigure } from "./bands-chain.ts";
 import type { VariantExpr } from "./variant.ts";
@@ -37,7 +38,7 @@ export interface Band {
   /** Holds only where the plate states all of these. */
   readonly needsPlate?: readonly PlateFigure[];
   /** Which of the check's readings, or ways of taking it, is meant. */
-  readonly way?: string;
+  readonly way?: WayId;
   /** Percent bands: what they are percent of, so that volts and amps can be classed too. */
   readonly percentOf?: PercentBase;
 }

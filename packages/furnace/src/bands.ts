@@ -3,7 +3,7 @@ import type { Chain, Segment } from "./bands-chain.ts";
 import { BANDS } from "./bands-data.ts";
 import type { Band, PercentBase } from "./bands-types.ts";
 import type { CheckId } from "./checks/check-ids.ts";
-import type { CheckPower } from "./checks/check-types.ts";
+import type { CheckPower, WayId } from "./checks/check-types.ts";
 import type { ReadingStage, ReadingUnit } from "./codes.ts";
 import type { UnitProfile } from "./profile.ts";
 import { evaluateVariant } from "./variant.ts";
@@ -22,7 +22,7 @@ export interface ResolvedBand {
   readonly key: string;
   readonly unit: ReadingUnit;
   readonly quantity: Band["quantity"];
-  readonly way?: string;
+  readonly way?: WayId;
   /** Lowest first; together they hold every number, infinity included, exactly once. */
   readonly segments: readonly Segment[];
   /** The chain in numbers, as the record keeps it: `F < 108 <= M < 110 <= G`. */
@@ -73,8 +73,8 @@ function holds(band: Band, profile: UnitProfile, situation: ReadingSituation): b
   return (band.needsPlate ?? []).every((figure) => plate[figure] !== undefined);
 }
 
-function siblingWays(check: CheckId): Set<string | undefined> {
-  return new Set(bandsOf(check).map((band) => band.way));
+function siblingWays(check: CheckId): Set<string> {
+  return new Set(bandsOf(check).flatMap((band) => band.way ?? []));
 }
 
 function loadAt({ stage, power }: ReadingSituation): "idle" | "loaded" {

@@ -1,1 +1,1 @@
-export {};
+export * from "./en.ts";

@@ -101,9 +101,55 @@ export type SetUp = (typeof SET_UPS)[number];
  */
 export type ReadingKind = "number" | "in-out" | "look";
 
+/** Ways of taking a check, and readings that a check is made of. */
+export const WAY_IDS = [
+  "by-hand",
+  "attended-clamp",
+  "imbalance",
+  "lowest-pair",
+  "in-and-out-volts",
+  "fuse-out-ohms",
+  "clamp-loop",
+  "series-meter",
+  "look",
+  "ohms",
+  "first-stage",
+  "high-stage",
+  "at-rest",
+  "at-speed",
+  "by-finger",
+  "inducer-out",
+  "from-ground",
+  "cleanout-open",
+  "cap-off",
+  "from-outside",
+  "screen-out",
+  "pour-at-trap",
+  "hose-off",
+  "trap-out",
+  "camera",
+  "burners-out",
+  "power-off",
+  "glow",
+  "board-display",
+  "in-place",
+  "pressure",
+  "drop",
+  "high-fire",
+  "low-fire",
+  "pressure-drop",
+  "on-delay",
+  "off-delay",
+  "co-air-free",
+  "oxygen",
+  "oxygen-low-fire",
+  "oxygen-change",
+] as const;
+export type WayId = (typeof WAY_IDS)[number];
+
 /** One way of taking a check, or one of the readings it is made of; opens what is listed besides the check's own. */
 export interface CheckWay {
-  readonly id: string;
+  readonly id: WayId;
   readonly opens: readonly Opening[];
 }
 

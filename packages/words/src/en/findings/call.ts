@@ -1,0 +1,52 @@
+export const call = {
+  "ck-tstat-settings": {
+    mode: "Mode is not HEAT",
+    "schedule-hold": "Schedule or hold",
+    "system-type": "System type wrong",
+    blank: "Screen blank",
+    "no-c-wire": "No common wire",
+  },
+  "ck-tstat-batteries": { low: "Cells low", blank: "Screen blank", "low-icon": "Low-battery icon" },
+  "ck-tstat-call-w": {
+    absent: "No call at the unit",
+    "c-lost-at-stat": "C lost at the thermostat",
+    "w-in-panel-not-out": "Into the zone panel, not out",
+    "r-at-stat-w-out-dead": "R there, no W out",
+    "no-r-at-stat": "No R at the thermostat",
+    pulsing: "Pulsing",
+    "ends-early": "Call ends early",
+    resistive: "Weak: bad contact",
+  },
+  "ck-tstat-rw-jumper": {
+    starts: "Starts",
+    "starts-at-stat-base": "Starts at the thermostat base",
+    "starts-at-unit-only": "Starts at the unit only",
+    "runs-unbroken": "Runs unbroken",
+    "no-start": "Does not start",
+  },
+  "ck-tstat-cable-ohms": {
+    open: "R or W open",
+    "c-open": "C open",
+    "data-pair": "Data pair open or shorted",
+    shorted: "Shorted",
+    high: "High",
+  },
+  "ck-anticipator": { mismatch: "Does not match", open: "Open" },
+  "ck-bas-enable": {
+    disabled: "Heat disabled",
+    "outdoor-lockout": "Outdoor lockout",
+    "cooling-mode": "Cooling mode",
+    "low-limit-trip": "Low limit tripped",
+  },
+  "ck-smoke-contact": { latched: "Latched", "in-alarm": "In alarm now" },
+  "ck-overflow-switch": {
+    "open-wet": "Open, pan wet",
+    "open-reservoir-full": "Open, pump reservoir full",
+    "open-dry": "Open, pan dry",
+  },
+  "ck-twin-link": {
+    "out-of-phase": "Out of phase",
+    "link-open": "Link open",
+    "partner-dead": "Partner dead",
+  },
+} as const;

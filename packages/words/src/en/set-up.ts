@@ -1,0 +1,30 @@
+import type { SetUp } from "@emberladder/furnace";
+
+/** What has to be arranged before a check. */
+export const setUp: Readonly<Record<SetUp, string>> = {
+  "co-meter-zeroed": "CO meter zeroed outdoors",
+  "power-locked": "Power off, locked, proven dead",
+  "panel-open": "Panel off",
+  "meter-proved": "Meter proved on a known source",
+  "leads-off": "Leads off",
+  "call-for-heat": "Call for heat",
+  "motors-off": "Motors off",
+  "ladder-up": "Way up is safe",
+  "gas-shut": "Gas shut",
+  "meter-in-series": "Meter in series",
+  "manometer-zeroed": "Manometer zeroed",
+  "tee-in-tube": "Tee in the tube",
+  "tube-off": "Tube off",
+  "clamp-on": "Clamp on one lead",
+  unplugged: "Unplugged",
+  "capacitor-discharged": "Capacitor discharged",
+  "draft-gauge-zeroed": "Draft gauge zeroed",
+  "pilot-lit": "Pilot lit",
+  "manometer-on-inlet": "Hose on the inlet tap",
+  "others-running": "Other gas appliances running",
+  "manometer-on-manifold": "Hose on the manifold tap",
+  "burner-lit": "Burner or pilot lit",
+  "steady-10-min": "Burning ten minutes",
+  "analyser-zeroed": "Analyser zeroed in fresh air",
+  "steady-5-min": "Burning five minutes",
+};
