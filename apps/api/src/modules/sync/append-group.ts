@@ -188,7 +188,7 @@ function judgeItems(
       envelope,
       item.read,
       { state, devices: new Set(lastOfDevice.keys()) },
-      { role: actor.role, now: receivedAt },
+      actor.role,
     ))
       flags.push({ ...flag, eventId: envelope.id });
     state = evolveState(state, envelope, { serverSeq, actorId: actor.personId });

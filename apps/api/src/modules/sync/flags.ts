@@ -7,9 +7,6 @@ import type { Breach, DiagnosisState, ReadBody } from "./judge.ts";
 /** Flags that tell a supervisor something, but do not hold a report back. */
 export const INFORMATIVE_RULES: readonly string[] = ["clock-off", "unknown-step"];
 
-/** Events that belong after a closing. */
-const AFTER_CLOSING = ["report.requested", "event.undone", "event.corrected"];
-
 /** What is known of the record before an event, beside its folded state. */
 export interface Before {
   state: DiagnosisState;
@@ -19,21 +16,16 @@ export interface Before {
 
 /**
  * Everything to flag on an event: rules of the trade that it is against, and facts about the record: a
- * second device, a phone's clock that is off, an event after the closing, a record kept by a trainee.
+ * second device, a phone's clock that is off, a record kept by a trainee.
  */
-export function flagsOf(
-  event: Envelope,
-  read: ReadBody,
-  before: Before,
-  actor: { role: Role; now: number },
-): Breach[] {
-  const flags = findBreaches(before.state, read, actor.now);
+export function flagsOf(event: Envelope, read: ReadBody, before: Before, role: Role): Breach[] {
+  const flags = findBreaches(before.state, read, event.occurredAt + (event.serverOffsetMs ?? 0));
   const isFirstOfDevice = !before.devices.has(event.deviceId);
   const offsetMinutes = Math.round((event.serverOffsetMs ?? 0) / 60_000);
   if (isFirstOfDevice && Math.abs(offsetMinutes) > CLOCK_TOLERANCE_MINUTES)
     flags.push({ rule: "clock-off", params: { minutes: offsetMinutes } });
   if (isFirstOfDevice && before.devices.size > 0) flags.push({ rule: "second-device" });
-  if (isFirstOfDevice && actor.role === "trainee") flags.push({ rule: "recorded-by-trainee" });
-  if (before.state.closed !== null && !AFTER_CLOSING.includes(event.type)) flags.push({ rule: "late" });
+  if (isFirstOfDevice && role === "trainee") flags.push({ rule: "recorded-by-trainee" });
+  if (before.state.closed !== null && read.kind === "unknown") flags.push({ rule: "after-close" });
   return flags;
 }

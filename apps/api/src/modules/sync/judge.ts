@@ -1,19 +1,20 @@
-import { evolve, initialState, lastStageOf, parseBody } from "@emberladder/diagnosis";
-import type { BodyOf, DiagnosisState, Envelope, EventBody, RecordedEvent } from "@emberladder/diagnosis";
+import { breaches, evolve, initialState, lastStageOf, parseBody } from "@emberladder/diagnosis";
+import type {
+  BodyOf,
+  Breach,
+  DiagnosisState,
+  Envelope,
+  EventBody,
+  RecordedEvent,
+} from "@emberladder/diagnosis";
 
 /**
  * All that the server asks the record's own rules. The rules never refuse here: what a technician did is
  * kept, and what is against a rule is flagged.
  */
 
-export type { DiagnosisState };
+export type { Breach, DiagnosisState };
 export { initialState };
-
-/** A rule that an event is against. */
-export interface Breach {
-  rule: string;
-  params?: Record<string, string | number | boolean>;
-}
 
 /** An event's body as this build reads it. */
 export type ReadBody =
@@ -56,9 +57,18 @@ export function evolveState(
   return evolve(state, recorded);
 }
 
-/** The rules that an event is against in the state before it. */
-export function findBreaches(_state: DiagnosisState, read: ReadBody, _now: number): Breach[] {
-  return read.kind === "known" ? [] : [{ rule: "unknown-step" }];
+/**
+ * The rules that an event is against in the state before it.
+ * @param at when it happened by the server's clock, UTC milliseconds
+ */
+export function findBreaches(state: DiagnosisState, read: ReadBody, at: number): Breach[] {
+  if (read.kind !== "known") return [{ rule: "unknown-step" }];
+  try {
+    return breaches(state, read.event, { now: at });
+  } catch {
+    // A record that the rules cannot judge is kept all the same, and somebody has to look at it.
+    return [{ rule: "not-judged" }];
+  }
 }
 
 /** What lists and jobs need to know of a state. */
