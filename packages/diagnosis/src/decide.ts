@@ -27,20 +27,20 @@ export function decide(
 ): Decision {
   const events: EventBody[] = [];
   let current = state;
-  for (const [index, command] of commands.entries()) {
-    const parsed = parseBody(command.type, BODY_SCHEMA_VERSION, command.body);
+  for (const [index, wanted] of commands.entries()) {
+    const parsed = parseBody(wanted.type, BODY_SCHEMA_VERSION, wanted.body);
     if (!parsed.ok) {
       const field = parsed.issues[0]?.path ?? "";
       return { ok: false, refusal: { breaches: [{ rule: "unreadable", params: { field } }] } };
     }
-    const found = breaches(current, command, context);
+    const found = breaches(current, wanted, context);
     if (found.length > 0) return { ok: false, refusal: { breaches: found } };
-    events.push(command);
+    events.push(wanted);
     current = evolve(current, {
       id: `step-${current.log.length}-${index}`,
-      type: command.type,
+      type: wanted.type,
       schemaVersion: BODY_SCHEMA_VERSION,
-      body: command.body,
+      body: wanted.body,
       occurredAt: context.now,
       deviceId: "",
       deviceSeq: 0,

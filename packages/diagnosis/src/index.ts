@@ -17,3 +17,4 @@ export * from "./derive/proof.ts";
 export * from "./derive/steps.ts";
 export * from "./derive/undo.ts";
 export * from "./rules/breaches.ts";
+export * from "./derive/causes.ts";

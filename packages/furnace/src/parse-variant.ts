@@ -39,7 +39,8 @@ export class VariantSyntaxError extends Error {
 export function parseVariant(text: string): VariantExpr {
   const tokens = [...text.matchAll(/\s*([|&!()]|[a-z]+(?:!=|:)[A-Za-z0-9-]+(?:,[A-Za-z0-9-]+)*|[a-z]+)/gy)];
   const consumed = tokens.reduce((length, token) => length + token[0].length, 0);
-  if (text.slice(consumed).trim() !== "") throw new VariantSyntaxError("This is not a code or a sign of the grammar.", consumed);
+  if (text.slice(consumed).trim() !== "")
+    throw new VariantSyntaxError("This is not a code or a sign of the grammar.", consumed);
   let position = 0;
   const peek = () => tokens[position]?.[1];
   const where = () => tokens[position]?.index ?? text.length;
@@ -47,7 +48,11 @@ export function parseVariant(text: string): VariantExpr {
   const readTerm = (): VariantExpr => readList("&", readFactor, and);
   const readExpr = (): VariantExpr => readList("|", readTerm, or);
 
-  function readList(sign: string, read: () => VariantExpr, join: (...terms: VariantExpr[]) => VariantExpr): VariantExpr {
+  function readList(
+    sign: string,
+    read: () => VariantExpr,
+    join: (...terms: VariantExpr[]) => VariantExpr,
+  ): VariantExpr {
     const terms = [read()];
     while (peek() === sign) {
       position++;

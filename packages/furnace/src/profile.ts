@@ -143,18 +143,42 @@ export function profileProblems(profile: UnitProfile): ProfileProblem[] {
   const refuse = (when: boolean, field: string, reason: string) => {
     if (when) problems.push({ field, reason });
   };
-  refuse(codes.ignition === "SP" && codes.draft !== "ND", "codes.draft", "standing-pilot-needs-natural-draft");
-  refuse(codes.ignition === "SP" && codes.control !== "CV", "codes.control", "standing-pilot-needs-conventional");
-  refuse(codes.control === "CV" && codes.ignition !== "SP", "codes.control", "conventional-has-no-electronic-ignition");
+  refuse(
+    codes.ignition === "SP" && codes.draft !== "ND",
+    "codes.draft",
+    "standing-pilot-needs-natural-draft",
+  );
+  refuse(
+    codes.ignition === "SP" && codes.control !== "CV",
+    "codes.control",
+    "standing-pilot-needs-conventional",
+  );
+  refuse(
+    codes.control === "CV" && codes.ignition !== "SP",
+    "codes.control",
+    "conventional-has-no-electronic-ignition",
+  );
   refuse(isDirect(codes) && codes.draft === "ND", "codes.draft", "direct-ignition-needs-induced-draft");
   refuse(isDirect(codes) && codes.control === "VMC", "codes.control", "valve-mounted-control-lights-a-pilot");
-  refuse(codes.ignition === "HSI" && codes.control === "MOD-S", "codes.control", "hot-surface-direct-needs-board");
+  refuse(
+    codes.ignition === "HSI" && codes.control === "MOD-S",
+    "codes.control",
+    "hot-surface-direct-needs-board",
+  );
   refuse(codes.staging === "MOD" && codes.control !== "IFC", "codes.staging", "modulating-needs-board");
   refuse(codes.draft === "ND" && codes.staging !== "1S", "codes.staging", "natural-draft-is-one-stage");
   refuse(codes.draft === "CON" && codes.location === "RTU", "codes.location", "condensing-is-not-rooftop");
   refuse(codes.draft === "CON" && codes.control !== "IFC", "codes.control", "condensing-needs-board");
-  refuse(options["psc-blower"] === true && options["ecm-blower"] === true, "options.ecm-blower", "one-blower-kind");
-  refuse(options["vent-damper"] === true && codes.draft !== "ND", "options.vent-damper", "vent-damper-needs-natural-draft");
+  refuse(
+    options["psc-blower"] === true && options["ecm-blower"] === true,
+    "options.ecm-blower",
+    "one-blower-kind",
+  );
+  refuse(
+    options["vent-damper"] === true && codes.draft !== "ND",
+    "options.vent-damper",
+    "vent-damper-needs-natural-draft",
+  );
   const ordered = (low: keyof PlateFigures, high: keyof PlateFigures) => {
     const a = plate[low];
     const b = plate[high];

@@ -47,7 +47,8 @@ export function ignitionSightOf(profile: UnitProfile): "glow" | "spark" | null {
   return sight === "glow" || sight === "spark" ? sight : null;
 }
 
-export type WatchEnd = "flame-lost" | "no-flame" | "no-glow" | "nothing" | "stopped" | "locked-out" | "limit-cut" | "satisfied";
+export type WatchEnd =
+  "flame-lost" | "no-flame" | "no-glow" | "nothing" | "stopped" | "locked-out" | "limit-cut" | "satisfied";
 
 /**
  * The last stage completed in a watch: from the highest thing seen and how it ended. A blower that started

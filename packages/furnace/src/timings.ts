@@ -1,5 +1,5 @@
 import type { Stage } from "./codes.ts";
-import type { Timings, UnitProfile } from "./profile.ts";
+import type { UnitProfile } from "./profile.ts";
 import { stagesOf } from "./stages.ts";
 
 /** A duration in seconds as it is usually met, with the range seen. */
@@ -9,7 +9,16 @@ export interface Span {
   most: number;
 }
 
-export type TimingName = "prepurgeS" | "warmUpS" | "trialS" | "blowerOnDelayS" | "blowerOffDelayS" | "postPurgeS" | "interpurgeS" | "softLockoutS" | "stageTwoDelayS";
+export type TimingName =
+  | "prepurgeS"
+  | "warmUpS"
+  | "trialS"
+  | "blowerOnDelayS"
+  | "blowerOffDelayS"
+  | "postPurgeS"
+  | "interpurgeS"
+  | "softLockoutS"
+  | "stageTwoDelayS";
 
 /**
  * Timings of direct hot-surface units with an integrated board, where the label does not say. Common
@@ -43,7 +52,7 @@ export const STEADY_S = 600;
 
 /** The span of one timing for a unit: exactly what its label says, else the default. */
 export function timingOf(profile: UnitProfile, name: TimingName): Span {
-  const stated = (profile.timings as Timings)[name];
+  const stated = profile.timings[name];
   return stated === undefined ? DEFAULT_TIMINGS[name] : { usual: stated, least: stated, most: stated };
 }
 

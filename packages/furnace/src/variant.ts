@@ -1,4 +1,14 @@
-import type { Control, Draft, Fuel, Ignition, Location, OptionFlag, Options, Staging, VariantCodes } from "./codes.ts";
+import type {
+  Control,
+  Draft,
+  Fuel,
+  Ignition,
+  Location,
+  OptionFlag,
+  Options,
+  Staging,
+  VariantCodes,
+} from "./codes.ts";
 import type { FoundState, Severity } from "./codes.ts";
 
 /**
@@ -114,7 +124,11 @@ export function formatVariant(expr: VariantExpr): string {
   if ("opt" in expr) return `opt:${expr.opt}`;
   if ("sev" in expr) return `sev:${expr.sev}`;
   if ("found" in expr) return expr.found;
-  if ("not" in expr) return "or" in expr.not || "and" in expr.not ? `!(${formatVariant(expr.not)})` : `!${formatVariant(expr.not)}`;
-  if ("and" in expr) return expr.and.map((t) => ("or" in t ? `(${formatVariant(t)})` : formatVariant(t))).join(" & ");
+  if ("not" in expr)
+    return "or" in expr.not || "and" in expr.not
+      ? `!(${formatVariant(expr.not)})`
+      : `!${formatVariant(expr.not)}`;
+  if ("and" in expr)
+    return expr.and.map((t) => ("or" in t ? `(${formatVariant(t)})` : formatVariant(t))).join(" & ");
   return expr.or.map(formatVariant).join(" | ");
 }

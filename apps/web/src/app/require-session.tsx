@@ -17,12 +17,14 @@ export function RequireSession() {
     let stop: (() => void) | undefined;
     let left = false;
     // The store and its sender come after the shell has painted.
-    void Promise.all([import("#lib/store/sender.ts"), import("#lib/store/device.ts")]).then(async ([sender, device]) => {
-      await device.rememberDevice(personId, deviceId);
-      if (left) return;
-      sender.startSender(personId);
-      stop = sender.stopSender;
-    });
+    void Promise.all([import("#lib/store/sender.ts"), import("#lib/store/device.ts")]).then(
+      async ([sender, device]) => {
+        await device.rememberDevice(personId, deviceId);
+        if (left) return;
+        sender.startSender(personId);
+        stop = sender.stopSender;
+      },
+    );
     return () => {
       left = true;
       stop?.();

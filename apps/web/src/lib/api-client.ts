@@ -1,5 +1,5 @@
 import { addressOf } from "@emberladder/contract";
-import type { AnswerOf, RouteContract } from "@emberladder/contract";
+import type { AnswerOf, BodyOf, RouteContract } from "@emberladder/contract";
 
 /** What went wrong with a request, as the screens need to know it. */
 export class ApiProblem extends Error {
@@ -8,7 +8,13 @@ export class ApiProblem extends Error {
   readonly code: string;
   readonly detail: string | undefined;
   readonly fields: { path: string; message: string }[];
-  constructor(status: number, code: string, title: string, detail?: string, fields: { path: string; message: string }[] = []) {
+  constructor(
+    status: number,
+    code: string,
+    title: string,
+    detail?: string,
+    fields: { path: string; message: string }[] = [],
+  ) {
     super(title);
     this.name = "ApiProblem";
     this.status = status;
@@ -21,10 +27,10 @@ export class ApiProblem extends Error {
 /** Milliseconds after which a request counts as not answered: a captive portal or a dead cell stalls. */
 const REQUEST_TIMEOUT_MS = 10_000;
 
-interface CallInput {
+interface CallInput<C extends RouteContract> {
   params?: Record<string, string>;
   query?: Record<string, string | number | boolean | undefined>;
-  body?: unknown;
+  body?: BodyOf<C>;
   signal?: AbortSignal;
 }
 
@@ -32,12 +38,14 @@ interface CallInput {
  * Calls one route of the contract and returns its answer, checked by the contract's own schema.
  * @throws ApiProblem for every refusal, and with code `offline` where no answer of ours came back.
  */
-export async function callApi<C extends RouteContract<never, never, never, never>>(
+export async function callApi<C extends RouteContract>(
   contract: C,
-  input: CallInput = {},
+  input: CallInput<C> = {},
 ): Promise<AnswerOf<C>> {
   const query = new URLSearchParams(
-    Object.entries(input.query ?? {}).flatMap(([key, value]) => (value === undefined ? [] : [[key, String(value)]])),
+    Object.entries(input.query ?? {}).flatMap(([key, value]) =>
+      value === undefined ? [] : [[key, String(value)]],
+    ),
   ).toString();
   const timeout = AbortSignal.timeout(REQUEST_TIMEOUT_MS);
   let response: Response;
@@ -58,7 +66,8 @@ export async function callApi<C extends RouteContract<never, never, never, never
   }
   if (response.status === 204) return undefined as AnswerOf<C>;
   const type = response.headers.get("content-type") ?? "";
-  if (!type.includes("json")) throw new ApiProblem(0, "offline", "Something between here and the server answered instead of it.");
+  if (!type.includes("json"))
+    throw new ApiProblem(0, "offline", "Something between here and the server answered instead of it.");
   const body: unknown = await response.json();
   if (!response.ok) throw problemOf(response.status, body);
   return body as AnswerOf<C>;
@@ -71,5 +80,20 @@ function problemOf(status: number, body: unknown): ApiProblem {
     detail?: string;
     errors?: { path: string; message: string }[];
   };
-  return new ApiProblem(status, problem.code ?? "server-fault", problem.title ?? "", problem.detail, problem.errors ?? []);
+  return new ApiProblem(
+    status,
+    problem.code ?? "server-fault",
+    problem.title ?? "",
+    problem.detail,
+    problem.errors ?? [],
+  );
+}
+
+/** A JSON pointer as the dotted name that forms use: `/profile/codes/draft` is `profile.codes.draft`. */
+function pathOfPointer(pointer: string): string {
+  return pointer
+    .split("/")
+    .slice(1)
+    .map((key) => key.replaceAll("~1", "/").replaceAll("~0", "~"))
+    .join(".");
 }

@@ -1,5 +1,6 @@
 import i18next from "i18next";
 import { initReactI18next } from "react-i18next";
+import { desk } from "#messages/en/desk.ts";
 import { ui } from "#messages/en/ui.ts";
 
 /**
@@ -10,9 +11,9 @@ export async function startI18n(): Promise<void> {
   await i18next.use(initReactI18next).init({
     lng: "en",
     fallbackLng: "en",
-    ns: ["ui"],
+    ns: ["ui", "desk"],
     defaultNS: "ui",
-    resources: { en: { ui } },
+    resources: { en: { ui, desk } },
     interpolation: { escapeValue: false },
     returnNull: false,
   });

@@ -1,4 +1,5 @@
-export type ParsedReading = { ok: true; value: number | "OL" } | { ok: false; reason: "empty" | "not-a-number" };
+export type ParsedReading =
+  { ok: true; value: number | "OL" } | { ok: false; reason: "empty" | "not-a-number" };
 
 /**
  * Reads a typed reading: point or comma, spaces ignored, a sign allowed, "OL" for beyond the meter's range.

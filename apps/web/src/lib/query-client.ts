@@ -7,7 +7,8 @@ export const queryClient = new QueryClient({
     queries: {
       staleTime: 15_000,
       refetchOnWindowFocus: true,
-      retry: (failures, error) => !(error instanceof ApiProblem && error.status >= 400 && error.status < 500) && failures < 2,
+      retry: (failures, error) =>
+        !(error instanceof ApiProblem && error.status >= 400 && error.status < 500) && failures < 2,
     },
   },
 });

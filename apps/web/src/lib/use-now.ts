@@ -17,3 +17,9 @@ export function formatClock(seconds: number): string {
   const whole = Math.max(0, Math.floor(seconds));
   return `${Math.floor(whole / 60)}:${String(whole % 60).padStart(2, "0")}`;
 }
+
+/** The time at which a screen was opened, milliseconds: near enough for what depends on months. */
+export function useOpenedAt(): number {
+  const [openedAt] = useState(() => Date.now());
+  return openedAt;
+}

@@ -5,6 +5,7 @@ import {
   lastStageOfWatch,
   stageOfSight,
   stagesOf,
+  stoppedAt,
 } from "@emberladder/furnace";
 import type { LastStage, ReadingUnit, Sight, Stage } from "@emberladder/furnace";
 import type { DiagnosisState, Observation, Watch } from "../state/diagnosis-state.ts";
@@ -53,7 +54,7 @@ export function ladderOf(state: DiagnosisState): Rung[] {
   const stages = stagesOf(profile.codes, profile.options);
   const watch = lastWatch(state);
   const last = lastStageOf(state);
-  const reached = last === "any" || last === "none" ? -1 : stages.indexOf(last as Stage);
+  const reached = last === "any" || last === "none" ? -1 : stages.indexOf(last);
   const running = watch !== undefined && !watch.ended;
   const cycled = state.proofs["close-cycles"] !== undefined;
   return stages.map((stage, index) => {
@@ -121,4 +122,10 @@ function readingOf(observation: Observation | undefined): Pick<Rung, "reading"> 
 export function heightOf(stage: LastStage): number {
   if (stage === "none") return -1;
   return stage === "any" ? -2 : STAGES.indexOf(stage);
+}
+
+/** The rung the unit stopped at; null where nothing was watched or all of it ran. */
+export function stoppedStageOf(state: DiagnosisState): Stage | null {
+  const { profile } = state;
+  return profile ? stoppedAt(lastStageOf(state), profile.codes, profile.options) : null;
 }

@@ -19,7 +19,9 @@ export const visitEvents = {
     callId: z.uuid(),
     unitId: z.uuid(),
     profile: unitProfileSchema,
-    tree: z.strictObject({ id: slug, version: z.number().int().min(1), hash: z.string().max(64) }).nullable(),
+    tree: z
+      .strictObject({ id: z.uuid(), version: z.number().int().min(1), hash: z.string().max(64) })
+      .nullable(),
     catalogueVersion: z.string().max(40),
     modelVersion: z.string().max(40),
   }),

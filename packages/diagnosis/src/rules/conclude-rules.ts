@@ -8,6 +8,9 @@ import type { Breach } from "./breach.ts";
 /** Checks of devices that stay open until pressed: found tripped, they need a cause. */
 const MANUAL_RESET_CHECKS = ["ck-rollout", "ck-spill-switch", "ck-aux-limit"];
 
+/** The cause written where nothing was proven and nothing is suspected. */
+export const UNKNOWN_CAUSE = "unknown";
+
 /** Something seen or read, in the shape in which evidence is judged. */
 interface Evidence {
   check: string;
@@ -29,6 +32,9 @@ export function foundTripped(state: DiagnosisState): boolean {
  */
 export function concludeRules(state: DiagnosisState, body: BodyOf<"cause.concluded">): Breach[] {
   const { cause, proven } = body;
+  if (!proven && cause === UNKNOWN_CAUSE) {
+    return breachWhere(!body.openQuestionRef && { rule: "open-question-missing" });
+  }
   if (isSymptomId(cause))
     return [{ rule: "symptom-is-not-a-cause", params: { cause, causes: causesOf(cause).join(" ") } }];
   if (!isFaultId(cause)) return [{ rule: "fault-unknown", params: { cause } }];

@@ -68,7 +68,7 @@ export interface DiagnosisState {
   opened: (Trace & BodyOf<"diagnosis.opened">) | null;
   profile: UnitProfile | null;
   unit: UnitState;
-  door: Partial<Record<DoorAnswer["question"], DoorAnswer>>;
+  door: { [Q in DoorAnswer["question"]]?: Extract<DoorAnswer, { question: Q }> };
   raised: readonly StopRaised[];
   stopActs: readonly StopAct[];
   confirmed: (Trace & { complaintRef?: string; changedUnit: boolean }) | null;

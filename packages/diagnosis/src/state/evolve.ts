@@ -42,7 +42,7 @@ export function fold(events: readonly RecordedEvent[]): DiagnosisState {
 function readChanges(events: readonly RecordedEvent[]) {
   const undone: Record<string, string> = {};
   const corrections: { of: string; by: string; body: unknown }[] = [];
-  for (const event of [...events].reverse()) {
+  for (const event of events.toReversed()) {
     if (undone[event.id]) continue;
     const parsed = parseBody(event.type, event.schemaVersion, event.body);
     if (!parsed.ok || !parsed.known) continue;

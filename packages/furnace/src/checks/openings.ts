@@ -12,7 +12,7 @@ export const PUT_BACK_KINDS = [
 ] as const;
 export type PutBackKind = (typeof PUT_BACK_KINDS)[number];
 
-/** What a check of the catalogue opens, lifts, fits or shuts. */
+/** What a check or a repair opens, lifts, takes out, fits or shuts. */
 export const OPENED_THINGS = [
   "burner-door",
   "blower-door",
@@ -54,6 +54,10 @@ export const OPENED_THINGS = [
   "static-test-plugs",
   "blower-capacitor-leads",
   "flue-test-plug",
+  "valve-inlet-joint",
+  "valve-outlet-joint",
+  "flame-sensor",
+  "igniter",
 ] as const;
 export type OpenedThing = (typeof OPENED_THINGS)[number];
 

@@ -1,7 +1,13 @@
 import { assign, setup } from "xstate";
 import type { UnitProfile } from "../profile.ts";
 import { DEFAULT_RECYCLES, DEFAULT_TRIES } from "../timings.ts";
-import type { SequenceContext, SequenceEvent, SequenceMeta, SequenceOutputs, SequenceTimer } from "./sequence-types.ts";
+import type {
+  SequenceContext,
+  SequenceEvent,
+  SequenceMeta,
+  SequenceOutputs,
+  SequenceTimer,
+} from "./sequence-types.ts";
 import type { LastStage } from "../codes.ts";
 
 const OFF: SequenceOutputs = { inducer: "off", igniter: false, gas: "off" };
@@ -44,8 +50,12 @@ const directIgnition = setup({
     countRecycle: assign({ recycles: ({ context }) => context.recycles + 1, tries: 0 }),
     startOver: assign({ tries: 0, recycles: 0 }),
     blowerStarts: assign({ blower: "on" }),
-    blowerRunsOn: assign({ blower: ({ context }) => (context.blower === "on" ? "running-on" : context.blower) }),
-    blowerStops: assign({ blower: ({ context }) => (context.blower === "running-on" ? "off" : context.blower) }),
+    blowerRunsOn: assign({
+      blower: ({ context }) => (context.blower === "on" ? "running-on" : context.blower),
+    }),
+    blowerStops: assign({
+      blower: ({ context }) => (context.blower === "running-on" ? "off" : context.blower),
+    }),
     powerLost: assign({ tries: 0, recycles: 0, blower: "off", draftClosed: false }),
     highCallOn: assign({ highCall: true }),
     highCallOff: assign({ highCall: false }),

@@ -56,6 +56,10 @@ const what: Readonly<Record<OpenedThing, string>> = {
   "static-test-plugs": "Static test plugs",
   "blower-capacitor-leads": "Blower capacitor leads",
   "flue-test-plug": "Flue test plug",
+  "valve-inlet-joint": "Joint ahead of the gas valve",
+  "valve-outlet-joint": "Joint after the gas valve",
+  "flame-sensor": "Flame sensor",
+  igniter: "Igniter",
 };
 
 const state: Readonly<Record<PutBackKind, string>> = {
@@ -112,6 +116,10 @@ const outBy: Readonly<Record<OpenedThing, PutBackKind>> = {
   "static-test-plugs": "part-removed",
   "blower-capacitor-leads": "lead-lifted",
   "flue-test-plug": "part-removed",
+  "valve-inlet-joint": "gas-joint-opened",
+  "valve-outlet-joint": "gas-joint-opened",
+  "flame-sensor": "part-removed",
+  igniter: "part-removed",
 };
 
 const out = Object.fromEntries(

@@ -21,13 +21,19 @@ export function DeskLayout() {
   const { can } = useSession();
   return (
     <div className="flex min-h-dvh flex-col">
-      <a href="#content" className="sr-only focus:not-sr-only focus:absolute focus:z-10 focus:bg-surface focus:p-3">
+      <a
+        href="#content"
+        className="sr-only focus:not-sr-only focus:absolute focus:z-10 focus:bg-surface focus:p-3"
+      >
         {t("nav.skip")}
       </a>
       <header className="border-b-3 border-ink bg-surface">
         <div className="flex min-h-12 flex-wrap items-center gap-x-6 px-4 desk:px-6">
           <Wordmark />
-          <nav aria-label={t("nav.label")} className="order-last -mx-4 flex w-screen overflow-x-auto px-4 desk:order-none desk:mx-0 desk:w-auto desk:px-0">
+          <nav
+            aria-label={t("nav.label")}
+            className="order-last -mx-4 flex w-screen overflow-x-auto px-4 desk:order-none desk:mx-0 desk:w-auto desk:px-0"
+          >
             {LINKS.filter((link) => !link.needs || can(link.needs)).map((link) => (
               <NavLink
                 key={link.to}
@@ -42,7 +48,9 @@ export function DeskLayout() {
           </nav>
           <div className="ml-auto flex items-center gap-3 py-1">
             {me.company.mode === "demo" && (
-              <span className="rounded border-2 border-ink px-2 text-label font-semibold desk:text-small">{t("nav.demo")}</span>
+              <span className="rounded border-2 border-ink px-2 text-label font-semibold desk:text-small">
+                {t("nav.demo")}
+              </span>
             )}
             <span className="hidden text-desk text-quiet desk:inline">{me.company.name}</span>
             <span className="hidden text-desk text-quiet desk:inline">{me.person.name}</span>

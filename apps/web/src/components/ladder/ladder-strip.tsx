@@ -32,8 +32,18 @@ export function LadderStrip({
   const gap = (foot - TOP) / (rungs.length + 0.6);
   const yOf = (index: number) => foot - gap * (index + 0.8);
   return (
-    <button type="button" onClick={onOpen} className="relative w-12 shrink-0 border-r-2 border-hair bg-ground p-0" aria-label={t("ladder.open")}>
-      <svg viewBox={`0 0 ${WIDTH} ${HEIGHT + 8}`} preserveAspectRatio="none" className="absolute inset-0 size-full" aria-hidden="true">
+    <button
+      type="button"
+      onClick={onOpen}
+      className="relative w-12 shrink-0 border-r-2 border-hair bg-ground p-0"
+      aria-label={t("ladder.open")}
+    >
+      <svg
+        viewBox={`0 0 ${WIDTH} ${HEIGHT + 8}`}
+        preserveAspectRatio="none"
+        className="absolute inset-0 size-full"
+        aria-hidden="true"
+      >
         <line x1={13} x2={13} y1={TOP} y2={foot} stroke="var(--ink)" strokeWidth="var(--rail)" />
         <line x1={35} x2={35} y1={TOP} y2={foot} stroke="var(--ink)" strokeWidth="var(--rail)" />
         {rungs.map((rung, index) => (
@@ -44,8 +54,20 @@ export function LadderStrip({
             <path key={rung.stage} d={`M47 ${yOf(index) - 7} v14 l-7 -7 z`} fill="var(--ink)" />
           ) : null,
         )}
-        {(door || stopped) && <line x1={5} x2={43} y1={foot + 4} y2={foot + 4} stroke="var(--ink)" strokeWidth={4} />}
-        {stopped && <line x1={5} x2={43} y1={foot + 12} y2={foot + 12} stroke="var(--ink)" strokeWidth={8} strokeDasharray="4 4" />}
+        {(door || stopped) && (
+          <line x1={5} x2={43} y1={foot + 4} y2={foot + 4} stroke="var(--ink)" strokeWidth={4} />
+        )}
+        {stopped && (
+          <line
+            x1={5}
+            x2={43}
+            y1={foot + 12}
+            y2={foot + 12}
+            stroke="var(--ink)"
+            strokeWidth={8}
+            strokeDasharray="4 4"
+          />
+        )}
         {door &&
           Array.from({ length: door.of }, (_, index) => (
             <circle

@@ -15,7 +15,15 @@ export function RungBar({ rung, left, right, y }: { rung: Rung; left: number; ri
     case "climbing":
       return (
         <g>
-          <line x1={middle} x2={right} y1={y} y2={y} stroke="var(--rule)" strokeWidth={1.5} strokeDasharray="2 3" />
+          <line
+            x1={middle}
+            x2={right}
+            y1={y}
+            y2={y}
+            stroke="var(--rule)"
+            strokeWidth={1.5}
+            strokeDasharray="2 3"
+          />
           <line x1={left} x2={middle} y1={y} y2={y} stroke="var(--proven)" strokeWidth={4} />
           <circle cx={middle} cy={y} r={4.5} fill="var(--proven)" />
         </g>
@@ -40,7 +48,15 @@ export function RungBar({ rung, left, right, y }: { rung: Rung; left: number; ri
       return (
         <g>
           <line x1={left - reach} x2={right + reach} y1={y} y2={y} stroke="var(--glow)" strokeWidth={14} />
-          <line className="rung-lit" x1={left - reach} x2={right + reach} y1={y} y2={y} stroke="var(--proven)" strokeWidth="var(--lit)" />
+          <line
+            className="rung-lit"
+            x1={left - reach}
+            x2={right + reach}
+            y1={y}
+            y2={y}
+            stroke="var(--proven)"
+            strokeWidth="var(--lit)"
+          />
         </g>
       );
     case "stopped":
@@ -55,14 +71,36 @@ export function RungBar({ rung, left, right, y }: { rung: Rung; left: number; ri
             strokeWidth={rung.litToGap ? 6 : 3.5}
           />
           <line x1={middle + 9} x2={right + reach} y1={y} y2={y} stroke="var(--stopped)" strokeWidth={3.5} />
-          <line x1={middle - 9} x2={middle - 9} y1={y - 9} y2={y + 9} stroke="var(--stopped)" strokeWidth={3.5} />
-          <line x1={middle + 9} x2={middle + 9} y1={y - 9} y2={y + 9} stroke="var(--stopped)" strokeWidth={3.5} />
+          <line
+            x1={middle - 9}
+            x2={middle - 9}
+            y1={y - 9}
+            y2={y + 9}
+            stroke="var(--stopped)"
+            strokeWidth={3.5}
+          />
+          <line
+            x1={middle + 9}
+            x2={middle + 9}
+            y1={y - 9}
+            y2={y + 9}
+            stroke="var(--stopped)"
+            strokeWidth={3.5}
+          />
         </g>
       );
     case "bypassed":
       return (
         <g>
-          <line x1={left} x2={right} y1={y} y2={y} stroke="var(--bypassed)" strokeWidth={7} strokeDasharray="3 3" />
+          <line
+            x1={left}
+            x2={right}
+            y1={y}
+            y2={y}
+            stroke="var(--bypassed)"
+            strokeWidth={7}
+            strokeDasharray="3 3"
+          />
           <circle cx={left} cy={y} r={4} fill="var(--bypassed)" />
           <circle cx={right} cy={y} r={4} fill="var(--bypassed)" />
         </g>

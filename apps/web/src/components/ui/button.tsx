@@ -32,7 +32,11 @@ export function PlainButton({ children, compact, ...native }: Native & { compact
 /** A small act in words, underlined like a link, with a full-size target. */
 export function LinkButton({ children, ...native }: Native) {
   return (
-    <button type="button" {...native} className="min-h-12 px-1 text-field font-semibold text-link underline underline-offset-4">
+    <button
+      type="button"
+      {...native}
+      className="min-h-12 px-1 text-field font-semibold text-link underline underline-offset-4"
+    >
       {children}
     </button>
   );

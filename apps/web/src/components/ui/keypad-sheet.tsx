@@ -49,13 +49,28 @@ export function KeypadSheet({
       <h1 className="text-question">{title}</h1>
       <p className="text-field text-quiet">{hint}</p>
       {error && (
-        <p id={errorId} role="alert" className="border-l-6 border-ink bg-surface p-3 text-field font-semibold">
+        <p
+          id={errorId}
+          role="alert"
+          className="border-l-6 border-ink bg-surface p-3 text-field font-semibold"
+        >
           {error}
         </p>
       )}
-      <ReadingField inputRef={field} label={label} unit={unit} text={text} onChange={setText} onSubmit={save} invalid={error !== null} describedBy={error ? errorId : undefined} />
+      <ReadingField
+        inputRef={field}
+        label={label}
+        unit={unit}
+        text={text}
+        onChange={setText}
+        onSubmit={save}
+        invalid={error !== null}
+        describedBy={error ? errorId : undefined}
+      />
       <PrimaryButton onClick={save}>
-        {parsed.ok && parsed.value !== "OL" ? t("reading.record", { value: text.trim(), unit }) : t("reading.recordEmpty")}
+        {parsed.ok && parsed.value !== "OL"
+          ? t("reading.record", { value: text.trim(), unit })
+          : t("reading.recordEmpty")}
       </PrimaryButton>
       <LinkButton onClick={onCancel}>{t("reading.cancel")}</LinkButton>
     </main>

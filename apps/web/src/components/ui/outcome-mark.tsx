@@ -16,7 +16,9 @@ export function OutcomeMark({ outcome }: { outcome: Outcome }) {
           <path d="M13 2a8 8 0 0 1 0 16z" fill="var(--ink)" />
         </>
       )}
-      {outcome === "fail" && <path d="M1 10h7M18 10h7M9 2v16M17 2v16" stroke="var(--ink)" strokeWidth={3.2} />}
+      {outcome === "fail" && (
+        <path d="M1 10h7M18 10h7M9 2v16M17 2v16" stroke="var(--ink)" strokeWidth={3.2} />
+      )}
     </svg>
   );
 }

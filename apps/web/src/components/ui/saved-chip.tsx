@@ -16,9 +16,24 @@ export function SavedChip() {
       to={paths.sync}
       className={`flex items-center justify-center gap-2 border-x-2 border-hair px-1 text-label leading-4.5 font-medium no-underline ${alarming ? "bg-stopped text-on-stopped" : "text-ink"}`}
     >
-      <svg viewBox="0 0 22 30" width={20} height={28} fill="none" stroke="currentColor" strokeWidth={2.4} className="shrink-0" aria-hidden="true">
+      <svg
+        viewBox="0 0 22 30"
+        width={20}
+        height={28}
+        fill="none"
+        stroke="currentColor"
+        strokeWidth={2.4}
+        className="shrink-0"
+        aria-hidden="true"
+      >
         <rect x={2} y={2} width={18} height={26} rx={3} />
-        {saved.kind === "sending" ? <path d="M11 22V9M6 13l5-5 5 5" /> : alarming ? <path d="M11 8v9M11 21v2" /> : <path d="M6 15l4 4 6-8" />}
+        {saved.kind === "sending" ? (
+          <path d="M11 22V9M6 13l5-5 5 5" />
+        ) : alarming ? (
+          <path d="M11 8v9M11 21v2" />
+        ) : (
+          <path d="M6 15l4 4 6-8" />
+        )}
       </svg>
       <span role="status" className="max-w-17">
         {words}

@@ -45,13 +45,19 @@ export function scaleOfBand(segments: readonly ScaleSegment[], width: number) {
       x0,
       x1: x,
       label: (format) =>
-        [Number.isFinite(segment.from) ? `from ${format(segment.from)}` : "", Number.isFinite(segment.to) ? `to ${format(segment.to)}` : ""]
+        [
+          Number.isFinite(segment.from) ? `from ${format(segment.from)}` : "",
+          Number.isFinite(segment.to) ? `to ${format(segment.to)}` : "",
+        ]
           .filter(Boolean)
           .join(" "),
     };
   });
   const place = (value: number): { x: number; beyond: -1 | 0 | 1 } => {
-    const index = Math.max(0, segments.findIndex((segment) => value < segment.to || segment.to === Infinity));
+    const index = Math.max(
+      0,
+      segments.findIndex((segment) => value < segment.to || segment.to === Infinity),
+    );
     const segment = segments[index];
     const zone = zones[index];
     if (!segment || !zone) return { x: 0, beyond: 0 };
@@ -63,7 +69,9 @@ export function scaleOfBand(segments: readonly ScaleSegment[], width: number) {
   };
   return {
     zones,
-    edges: zones.slice(1).map((zone) => ({ value: zone.from, x: zone.x0, labelX: Math.min(width - 18, Math.max(18, zone.x0)) })),
+    edges: zones
+      .slice(1)
+      .map((zone) => ({ value: zone.from, x: zone.x0, labelX: Math.min(width - 18, Math.max(18, zone.x0)) })),
     names: namesOf(zones, width),
     place,
     outcomeAt: (value: number): Outcome | undefined => {

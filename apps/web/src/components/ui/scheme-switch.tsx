@@ -14,7 +14,15 @@ export function SchemeSwitch() {
       title={t(`scheme.${scheme}`)}
       className="grid size-12 place-items-center rounded border-2 border-rule"
     >
-      <svg viewBox="0 0 24 24" width={22} height={22} fill="none" stroke="currentColor" strokeWidth={2} aria-hidden="true">
+      <svg
+        viewBox="0 0 24 24"
+        width={22}
+        height={22}
+        fill="none"
+        stroke="currentColor"
+        strokeWidth={2}
+        aria-hidden="true"
+      >
         <circle cx={12} cy={12} r={9} />
         {scheme === "system" && <path d="M12 3a9 9 0 0 1 0 18z" fill="currentColor" />}
         {scheme === "attic" && <circle cx={12} cy={12} r={9} fill="currentColor" />}

@@ -76,4 +76,3 @@ function OpenDiagnosis({ loaded }: { loaded: LoadedDiagnosis }) {
     </DiagnosisContext>
   );
 }
-

@@ -17,7 +17,10 @@ export interface LoadedDiagnosis {
  * A diagnosis with what its screens need: events from this phone (pulled first where it has none), the tree
  * version it was opened with, and the call. Undefined where neither the phone nor the server has it.
  */
-export async function loadDiagnosis(diagnosisId: string, personId: string): Promise<LoadedDiagnosis | undefined> {
+export async function loadDiagnosis(
+  diagnosisId: string,
+  personId: string,
+): Promise<LoadedDiagnosis | undefined> {
   const here = await localStore.events.where("diagnosisId").equals(diagnosisId).count();
   if (here === 0) await pullFromServer(diagnosisId).catch(() => undefined);
   const session = await DiagnosisSession.open(diagnosisId, personId);

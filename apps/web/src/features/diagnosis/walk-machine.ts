@@ -58,7 +58,7 @@ const PATH_OF_STEP: Record<WalkStep, (diagnosisId: string) => string> = {
 
 /** The address of the screen for the next step of a diagnosis. */
 export function pathOfNext(diagnosisId: string, state: DiagnosisState, tree: TreeDocument | null): string {
-  const step = stepOf(state, tree);
+  const step = stepOf(state, tree, Date.now());
   const actor = createActor(walkMachine, { input: { step } }).start();
   actor.send({ type: "folded", step });
   const next = actor.getSnapshot().context.step;

@@ -9,7 +9,9 @@ export const APP_BUILD: string = import.meta.env["VITE_BUILD"] ?? "dev";
 
 /** Makes a note from a free text: the salt is random, the reference is its salted hash. */
 export function makeNote(text: string): NoteText {
-  const salt = [...crypto.getRandomValues(new Uint8Array(16))].map((byte) => byte.toString(16).padStart(2, "0")).join("");
+  const salt = [...crypto.getRandomValues(new Uint8Array(16))]
+    .map((byte) => byte.toString(16).padStart(2, "0"))
+    .join("");
   return { salt, text, hash: noteHash(salt, text) };
 }
 
@@ -30,7 +32,10 @@ export async function appendEvents(input: {
     const device = await readDevice(authorId, store);
     if (!device) throw new Error("This browser has no device id yet; sign in first.");
     const own = await store.events.where("[diagnosisId+deviceId]").equals([diagnosisId, device.id]).toArray();
-    const last = own.reduce<LocalEvent | undefined>((a, b) => (a && a.deviceSeq > b.deviceSeq ? a : b), undefined);
+    const last = own.reduce<LocalEvent | undefined>(
+      (a, b) => (a && a.deviceSeq > b.deviceSeq ? a : b),
+      undefined,
+    );
     const serverOffsetMs = ((await store.meta.get("serverOffsetMs"))?.value as number | undefined) ?? null;
     let prevHash = last?.hash ?? GENESIS_HASH;
     const sealed = events.map((event, index) => {
@@ -41,7 +46,7 @@ export async function appendEvents(input: {
         deviceSeq: device.lastSeq + index + 1,
         type: event.type,
         schemaVersion: BODY_SCHEMA_VERSION,
-        body: event.body as Record<string, unknown>,
+        body: event.body,
         occurredAt: Date.now(),
         tzOffsetMin: -new Date().getTimezoneOffset(),
         monotonicMs: Math.round(performance.now()),
@@ -55,7 +60,13 @@ export async function appendEvents(input: {
     });
     await store.events.bulkAdd(sealed);
     await store.outbox.bulkAdd(
-      sealed.map(({ id, deviceSeq, occurredAt }) => ({ id, diagnosisId, deviceSeq, authorId, addedAt: occurredAt })),
+      sealed.map(({ id, deviceSeq, occurredAt }) => ({
+        id,
+        diagnosisId,
+        deviceSeq,
+        authorId,
+        addedAt: occurredAt,
+      })),
     );
     await store.notes.bulkPut(notes.map((note) => ({ ...note, diagnosisId })));
     await writeDevice(authorId, { ...device, lastSeq: device.lastSeq + sealed.length }, store);

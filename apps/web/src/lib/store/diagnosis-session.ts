@@ -7,7 +7,8 @@ import { requestSend } from "./sender.ts";
 
 export type RecordResult = { ok: true; state: DiagnosisState } | { ok: false; refusal: Refusal };
 
-const channel = typeof BroadcastChannel === "undefined" ? undefined : new BroadcastChannel("emberladder-diagnoses");
+const channel =
+  typeof BroadcastChannel === "undefined" ? undefined : new BroadcastChannel("emberladder-diagnoses");
 
 /**
  * One diagnosis as this phone knows it: the folded state, and the only way to add to it. `record` decides,

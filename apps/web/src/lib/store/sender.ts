@@ -80,7 +80,10 @@ function scheduleRetry(): void {
 
 /** Sends the oldest items; returns whether there may be more. */
 async function sendOneBatch(): Promise<boolean> {
-  const waiting = await localStore.outbox.where("authorId").equals(authorId ?? "").sortBy("deviceSeq");
+  const waiting = await localStore.outbox
+    .where("authorId")
+    .equals(authorId ?? "")
+    .sortBy("deviceSeq");
   const ready = waiting.filter((row) => row.problem === undefined);
   const blocked = new Set(waiting.filter((row) => row.problem).map((row) => row.diagnosisId));
   const rows = ready.filter((row) => !blocked.has(row.diagnosisId)).slice(0, MAX_BATCH_EVENTS);
@@ -94,7 +97,9 @@ async function sendOneBatch(): Promise<boolean> {
     for (const item of placed) await localStore.events.update(item.id, { serverSeq: item.serverSeq });
     for (const item of answer.rejected) {
       if (!item.retryable && item.id) {
-        await localStore.outbox.update(item.id, { problem: { code: item.code, detail: item.detail, at: Date.now() } });
+        await localStore.outbox.update(item.id, {
+          problem: { code: item.code, detail: item.detail, at: Date.now() },
+        });
       }
     }
     await localStore.meta.put({ key: "serverOffsetMs", value: Math.round(answer.serverTime - Date.now()) });
@@ -112,7 +117,10 @@ async function takeBatch(rows: readonly OutboxRow[]) {
     if (events.length > 0 && bytes > MAX_BATCH_BYTES * 0.8) break;
     events.push(event);
   }
-  const notes = await localStore.notes.where("diagnosisId").anyOf([...new Set(events.map((event) => event.diagnosisId))]).toArray();
+  const notes = await localStore.notes
+    .where("diagnosisId")
+    .anyOf([...new Set(events.map((event) => event.diagnosisId))])
+    .toArray();
   return {
     events: events.map(({ serverSeq: _place, actorId: _who, ...envelope }) => envelope),
     notes: notes

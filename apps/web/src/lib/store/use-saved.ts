@@ -6,13 +6,22 @@ import { sendState } from "./sender.ts";
 export type SavedKind = "on-phone" | "waiting" | "sending" | "on-server" | "needs-sign-in" | "problem";
 
 /** What is saved where, for the chip and the sync screen. */
-export function useSaved(): { kind: SavedKind; waiting: number; problems: number; onServerAt: number | null } {
+export function useSaved(): {
+  kind: SavedKind;
+  waiting: number;
+  problems: number;
+  onServerAt: number | null;
+} {
   const sending = useSyncExternalStore(sendState.subscribe, sendState.get);
   const [counts, setCounts] = useState({ waiting: 0, problems: 0, events: 0 });
   useEffect(() => {
     const subscription = liveQuery(async () => {
       const rows = await localStore.outbox.toArray();
-      return { waiting: rows.length, problems: rows.filter((row) => row.problem).length, events: await localStore.events.count() };
+      return {
+        waiting: rows.length,
+        problems: rows.filter((row) => row.problem).length,
+        events: await localStore.events.count(),
+      };
     }).subscribe(setCounts);
     return () => subscription.unsubscribe();
   }, []);

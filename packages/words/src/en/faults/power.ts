@@ -176,12 +176,12 @@ export const power = {
   },
   "board-relay-inducer": {
     name: "Board inducer relay failed",
-    plain: "A switch on the control board no longer started the draft fan.",
+    plain: "A switch on the control board no longer started the exhaust fan.",
     what: "Call there, safeties closed, no volts to the inducer.",
   },
   "inducer-relay-failed": {
     name: "Inducer relay failed",
-    plain: "The relay that starts the draft fan had failed.",
+    plain: "The relay that starts the exhaust fan had failed.",
     what: "Coil has 24 V, nothing out to the inducer.",
     caution: "Line voltage at the contacts.",
   },

@@ -42,7 +42,8 @@ export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | 
   const started = state.current?.check === check ? state.current : null;
   const way = started?.way ?? node?.way;
   const ways = definition.ways ?? [];
-  const mustStart = !started && ((ways.length > 1 && node?.way === undefined) || openingsToAdd(state, check, way).length > 0);
+  const mustStart =
+    !started && ((ways.length > 1 && node?.way === undefined) || openingsToAdd(state, check, way).length > 0);
   const task: CheckTask = { check, node, way };
   const afterRepair = state.repairs.length > 0;
 
@@ -50,7 +51,10 @@ export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | 
 
   const links = (
     <div className="flex items-center justify-between gap-4">
-      <LinkButton onClick={() => setShowing(showing === "why" ? "answer" : "why")} aria-expanded={showing === "why"}>
+      <LinkButton
+        onClick={() => setShowing(showing === "why" ? "answer" : "why")}
+        aria-expanded={showing === "why"}
+      >
         {t("check.why")}
       </LinkButton>
       <LinkButton onClick={() => setShowing("cannot")}>{t("check.cannot")}</LinkButton>
@@ -107,8 +111,10 @@ export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | 
       />,
     );
   }
-  if (definition.reading === "in-out" && way !== "button" && way !== "ohms") return <InOutAnswer key={way} task={task} frame={frame} />;
-  if (definition.reading === "number" || definition.reading === "in-out") return <NumberAnswer key={way} task={task} frame={frame} />;
+  if (definition.reading === "in-out" && way !== "button" && way !== "ohms")
+    return <InOutAnswer key={way} task={task} frame={frame} />;
+  if (definition.reading === "number" || definition.reading === "in-out")
+    return <NumberAnswer key={way} task={task} frame={frame} />;
   return <LookAnswer key={way} task={task} frame={frame} />;
 }
 

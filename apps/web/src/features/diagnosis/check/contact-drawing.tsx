@@ -6,8 +6,17 @@ export function ContactDrawing({ contact }: { contact: ContactReading | undefine
   const { t } = useTranslation();
   const closed = contact === "closed";
   return (
-    <svg viewBox="0 0 296 96" className="block max-h-[120px] w-full" role="img" aria-label={t("inOut.drawing")}>
-      <path d="M6 34h104M186 34h104" stroke={closed ? "var(--proven)" : "var(--ink)"} strokeWidth={closed ? 6 : 3} />
+    <svg
+      viewBox="0 0 296 96"
+      className="block max-h-[120px] w-full"
+      role="img"
+      aria-label={t("inOut.drawing")}
+    >
+      <path
+        d="M6 34h104M186 34h104"
+        stroke={closed ? "var(--proven)" : "var(--ink)"}
+        strokeWidth={closed ? 6 : 3}
+      />
       {contact && contact !== "no-path" && <path d="M6 34h104" stroke="var(--proven)" strokeWidth={6} />}
       <path d="M130 14v40M166 14v40" stroke="var(--ink)" strokeWidth={5} />
       <path d="M110 34h20M166 34h20" stroke="var(--ink)" strokeWidth={3} />

@@ -29,11 +29,19 @@ export function FindingPicker({
           key={finding.id}
           className={`flex min-h-12 items-center rounded bg-surface px-4 text-field has-focus-visible:outline-3 ${finding.id === chosen ? "border-4 border-ink font-semibold" : "border-2 border-rule"}`}
         >
-          <input type="radio" name="finding" className="sr-only" checked={finding.id === chosen} onChange={() => onChoose(finding.id)} />
+          <input
+            type="radio"
+            name="finding"
+            className="sr-only"
+            checked={finding.id === chosen}
+            onChange={() => onChoose(finding.id)}
+          />
           {t(`trade:findings.${check}.${finding.id}`)}
         </label>
       ))}
-      {findings.length > FIRST_SHOWN && !all && <LinkButton onClick={() => setAll(true)}>{t("check.moreFindings")}</LinkButton>}
+      {findings.length > FIRST_SHOWN && !all && (
+        <LinkButton onClick={() => setAll(true)}>{t("check.moreFindings")}</LinkButton>
+      )}
     </fieldset>
   );
 }

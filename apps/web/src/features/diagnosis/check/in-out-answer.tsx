@@ -38,8 +38,21 @@ export function InOutAnswer({ task, frame }: { task: CheckTask; frame: Frame }) 
   const classified =
     inV === undefined || outV === undefined
       ? undefined
-      : classifyReading({ check, inV, outV, finding, stage: stageForCheck(check, node?.stage), power: powerOf(state.unit), way }, profile);
-  const fitting = findingsOf(check).filter((candidate) => classified?.outcome && candidate.classes.includes(classified.outcome));
+      : classifyReading(
+          {
+            check,
+            inV,
+            outV,
+            finding,
+            stage: stageForCheck(check, node?.stage),
+            power: powerOf(state.unit),
+            way,
+          },
+          profile,
+        );
+  const fitting = findingsOf(check).filter(
+    (candidate) => classified?.outcome && candidate.classes.includes(classified.outcome),
+  );
 
   const record = () => {
     if (inV === undefined || outV === undefined) {
@@ -80,8 +93,23 @@ export function InOutAnswer({ task, frame }: { task: CheckTask; frame: Frame }) 
       )}
       <ContactDrawing contact={contact} />
       <div className="flex gap-3">
-        <ReadingField compact inputRef={first} label={t("inOut.in")} unit="V" text={inText} onChange={setIn} onSubmit={record} />
-        <ReadingField compact label={t("inOut.out")} unit="V" text={outText} onChange={setOut} onSubmit={record} />
+        <ReadingField
+          compact
+          inputRef={first}
+          label={t("inOut.in")}
+          unit="V"
+          text={inText}
+          onChange={setIn}
+          onSubmit={record}
+        />
+        <ReadingField
+          compact
+          label={t("inOut.out")}
+          unit="V"
+          text={outText}
+          onChange={setOut}
+          onSubmit={record}
+        />
       </div>
       <ul className="flex flex-col gap-1" role="status">
         {VERDICTS.map((verdict) => (
@@ -98,7 +126,11 @@ export function InOutAnswer({ task, frame }: { task: CheckTask; frame: Frame }) 
       )}
     </>,
     <PrimaryButton onClick={record}>
-      {contact === "none-fits" && !readAgain ? t("inOut.setLowZ") : contact ? t("inOut.record", { what: t(`inOut.short.${contact}`) }) : t("reading.recordEmpty")}
+      {contact === "none-fits" && !readAgain
+        ? t("inOut.setLowZ")
+        : contact
+          ? t("inOut.record", { what: t(`inOut.short.${contact}`) })
+          : t("reading.recordEmpty")}
     </PrimaryButton>,
   );
 }

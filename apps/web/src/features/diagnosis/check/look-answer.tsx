@@ -16,8 +16,13 @@ export function LookAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
   const { state, profile, recordAndGoOn } = useDiagnosis();
   const { check, node } = task;
   const findings = findingsOf(check);
-  const inTree = new Set((node?.branches ?? []).flatMap((branch) => (branch.on === "finding" ? [branch.finding] : [])));
-  const ordered = inTree.size > 0 ? findings.toSorted((a, b) => Number(inTree.has(b.id)) - Number(inTree.has(a.id))) : findings;
+  const inTree = new Set(
+    (node?.branches ?? []).flatMap((branch) => (branch.on === "finding" ? [branch.finding] : [])),
+  );
+  const ordered =
+    inTree.size > 0
+      ? findings.toSorted((a, b) => Number(inTree.has(b.id)) - Number(inTree.has(a.id)))
+      : findings;
   const hasGood = findings.some((finding) => finding.classes.includes("good"));
   const record = (answer: { outcome: Outcome; finding?: string }) =>
     void recordAndGoOn([answerCommand({ state, profile, task, answer })]);
@@ -32,7 +37,11 @@ export function LookAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
       {ordered.map((finding) => {
         const outcome = lowerByFinding(undefined, check, finding.id) ?? finding.classes.at(-1) ?? "fail";
         return (
-          <AnswerButton key={finding.id} symbol={<OutcomeMark outcome={outcome} />} onChoose={() => record({ outcome, finding: finding.id })}>
+          <AnswerButton
+            key={finding.id}
+            symbol={<OutcomeMark outcome={outcome} />}
+            onChoose={() => record({ outcome, finding: finding.id })}
+          >
             {t(`trade:findings.${check}.${finding.id}`)}
           </AnswerButton>
         );

@@ -1,5 +1,13 @@
 import { stageForCheck, powerOf } from "@emberladder/diagnosis";
-import { classifyReading, findingsOf, getCheck, judgeReading, lowerByFinding, readingLimits, resolveBands } from "@emberladder/furnace";
+import {
+  classifyReading,
+  findingsOf,
+  getCheck,
+  judgeReading,
+  lowerByFinding,
+  readingLimits,
+  resolveBands,
+} from "@emberladder/furnace";
 import type { Outcome, ReadingUnit } from "@emberladder/furnace";
 import { useEffect, useId, useRef, useState } from "react";
 import { useTranslation } from "react-i18next";
@@ -34,13 +42,17 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
 
   const parsed = parseReading(text);
   const value = parsed.ok ? parsed.value : undefined;
-  const classified = value === undefined ? undefined : classifyReading({ check, value, unit, finding, ...situation }, profile);
+  const classified =
+    value === undefined ? undefined : classifyReading({ check, value, unit, finding, ...situation }, profile);
   const band = bands.find((candidate) => candidate.unit === unit);
   const outcome = classified?.outcome;
   const zone = (name: Outcome) => t([`trade:checks.${check}.zones.${name}`, `check.zones.${name}`]);
   const unitWord = t(`trade:units.${unit}`);
   const fitting = findingsOf(check).filter(
-    (candidate) => !outcome || candidate.classes.includes(outcome) || lowerByFinding(outcome, check, candidate.id) === outcome,
+    (candidate) =>
+      !outcome ||
+      candidate.classes.includes(outcome) ||
+      lowerByFinding(outcome, check, candidate.id) === outcome,
   );
   const onSight = definition.passesOnSight === true;
 
@@ -58,7 +70,9 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
     const judged = judgeReading(check, unit, value);
     if (judged === "impossible") {
       const { least, most } = readingLimits(check, unit);
-      setError(t("reading.outOfLimits", { least: formatNumber(least), most: formatNumber(most), unit: unitWord }));
+      setError(
+        t("reading.outOfLimits", { least: formatNumber(least), most: formatNumber(most), unit: unitWord }),
+      );
       field.current?.focus();
       return;
     }
@@ -72,7 +86,14 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
         state,
         profile,
         task,
-        answer: { outcome, finding, value, unit, bandUsed: band?.text, ...(judged === "unlikely" ? { confirmedUnlikely: true } : {}) },
+        answer: {
+          outcome,
+          finding,
+          value,
+          unit,
+          bandUsed: band?.text,
+          ...(judged === "unlikely" ? { confirmedUnlikely: true } : {}),
+        },
       }),
     ]);
   };
@@ -80,11 +101,17 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
   return frame(
     <>
       {error && (
-        <p id={errorId} role="alert" className="border-l-6 border-ink bg-surface p-3 text-field font-semibold">
+        <p
+          id={errorId}
+          role="alert"
+          className="border-l-6 border-ink bg-surface p-3 text-field font-semibold"
+        >
           {error}
         </p>
       )}
-      {definition.units.length > 1 && bands.length !== 1 && <UnitPicker units={definition.units} chosen={unit} onChoose={setUnit} />}
+      {definition.units.length > 1 && bands.length !== 1 && (
+        <UnitPicker units={definition.units} chosen={unit} onChoose={setUnit} />
+      )}
       <ReadingField
         inputRef={field}
         label={t([`trade:checks.${check}.reading`, "reading.label"])}
@@ -115,8 +142,18 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
         </p>
       )}
       {!band && value !== undefined && <p className="text-field text-quiet">{t("check.noBand")}</p>}
-      {(onSight || (outcome && outcome !== "good") || (value !== undefined && fitting.some((candidate) => node?.branches.some((branch) => branch.on === "finding" && branch.finding === candidate.id)))) && (
-        <FindingPicker check={check} findings={onSight && value === undefined ? findingsOf(check) : fitting} chosen={finding} onChoose={setFinding} />
+      {(onSight ||
+        (outcome && outcome !== "good") ||
+        (value !== undefined &&
+          fitting.some((candidate) =>
+            node?.branches.some((branch) => branch.on === "finding" && branch.finding === candidate.id),
+          ))) && (
+        <FindingPicker
+          check={check}
+          findings={onSight && value === undefined ? findingsOf(check) : fitting}
+          chosen={finding}
+          onChoose={setFinding}
+        />
       )}
     </>,
     <PrimaryButton onClick={record}>

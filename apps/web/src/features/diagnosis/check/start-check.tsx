@@ -28,15 +28,25 @@ export function StartCheck({
         const change = changeForCheck(state.unit, check, way);
         const opens = openingsToAdd(state, check, way);
         const acts = [
-          change.power === "off" ? t("check.start.powerOff") : change.power === "on" ? t("check.start.powerOn") : "",
-          change.calling === true ? t("check.start.call") : change.calling === false && change.power !== "off" ? t("check.start.endCall") : "",
+          change.power === "off"
+            ? t("check.start.powerOff")
+            : change.power === "on"
+              ? t("check.start.powerOn")
+              : "",
+          change.calling === true
+            ? t("check.start.call")
+            : change.calling === false && change.power !== "off"
+              ? t("check.start.endCall")
+              : "",
           ...opens.map((opening) => t(`trade:putBack.out.${opening.what}`)),
         ].filter(Boolean);
         return (
           <AnswerButton
             key={way ?? "only"}
             symbol={<StartMark />}
-            onChoose={() => onStart(way, Object.keys(change).length > 0 ? [command("unit-state.set", change)] : [])}
+            onChoose={() =>
+              onStart(way, Object.keys(change).length > 0 ? [command("unit-state.set", change)] : [])
+            }
           >
             <span className="block">{way ? t(`trade:ways.${way}`) : t("check.start.now")}</span>
             {acts.length > 0 && <span className="block font-normal text-quiet">{acts.join(" ")}</span>}

@@ -20,7 +20,13 @@ export function UnitPicker({
           key={unit}
           className={`flex min-h-12 items-center rounded bg-surface px-4 text-field has-focus-visible:outline-3 ${unit === chosen ? "border-4 border-ink font-semibold" : "border-2 border-rule"}`}
         >
-          <input type="radio" name="unit" className="sr-only" checked={unit === chosen} onChange={() => onChoose(unit)} />
+          <input
+            type="radio"
+            name="unit"
+            className="sr-only"
+            checked={unit === chosen}
+            onChange={() => onChoose(unit)}
+          />
           {t(`trade:units.${unit}`)}
         </label>
       ))}

@@ -10,7 +10,10 @@ export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: 
   const { t } = useTranslation();
   const out = openPutBacks(state).length;
   return (
-    <nav aria-label={t("dock.label")} className="grid h-15 shrink-0 grid-cols-3 border-t-3 border-ink bg-surface">
+    <nav
+      aria-label={t("dock.label")}
+      className="grid h-15 shrink-0 grid-cols-3 border-t-3 border-ink bg-surface"
+    >
       <Link
         to={paths.diagnosis.putBack(diagnosisId)}
         className="flex items-center justify-center gap-2 text-label leading-4.5 font-medium text-ink no-underline"

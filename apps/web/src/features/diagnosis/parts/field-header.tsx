@@ -7,8 +7,21 @@ export function FieldHeader({ title, subtitle }: { title: string; subtitle: stri
   const navigate = useNavigate();
   return (
     <header className="flex h-15 shrink-0 items-center border-b-3 border-ink bg-surface short:h-13">
-      <button type="button" onClick={() => void navigate(-1)} aria-label={t("field.back")} className="grid size-14 shrink-0 place-items-center short:h-13">
-        <svg viewBox="0 0 24 24" width={26} height={26} fill="none" stroke="currentColor" strokeWidth={2.6} aria-hidden="true">
+      <button
+        type="button"
+        onClick={() => void navigate(-1)}
+        aria-label={t("field.back")}
+        className="grid size-14 shrink-0 place-items-center short:h-13"
+      >
+        <svg
+          viewBox="0 0 24 24"
+          width={26}
+          height={26}
+          fill="none"
+          stroke="currentColor"
+          strokeWidth={2.6}
+          aria-hidden="true"
+        >
           <path d="M21 12H4M11 4.5 3.5 12l7.5 7.5" />
         </svg>
       </button>

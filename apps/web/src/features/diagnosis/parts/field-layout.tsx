@@ -57,11 +57,19 @@ export function FieldLayout({
             onOpen={() => void navigate(paths.diagnosis.ladder(diagnosisId))}
           />
         )}
-        <main className="flex min-w-0 grow flex-col overflow-y-auto" tabIndex={-1} aria-label={t("field.step")}>
+        <main
+          className="flex min-w-0 grow flex-col overflow-y-auto"
+          tabIndex={-1}
+          aria-label={t("field.step")}
+        >
           <div className="mx-auto flex w-full max-w-[560px] grow flex-col gap-3 p-4">{children}</div>
         </main>
       </div>
-      {pinned && <div className="border-t-1 border-hair bg-ground px-4 py-2"><div className="mx-auto max-w-[560px]">{pinned}</div></div>}
+      {pinned && (
+        <div className="border-t-1 border-hair bg-ground px-4 py-2">
+          <div className="mx-auto max-w-[560px]">{pinned}</div>
+        </div>
+      )}
       <FieldDock diagnosisId={diagnosisId} state={state} />
     </div>
   );

@@ -12,7 +12,12 @@ export function RefusalNote() {
   }, [refusal]);
   if (!refusal) return null;
   return (
-    <div ref={note} role="alert" tabIndex={-1} className="border-l-6 border-ink bg-surface p-3 text-field font-semibold">
+    <div
+      ref={note}
+      role="alert"
+      tabIndex={-1}
+      className="border-l-6 border-ink bg-surface p-3 text-field font-semibold"
+    >
       <ul className="flex flex-col gap-2">
         {refusal.breaches.map((breach) => (
           <li key={breach.rule + JSON.stringify(breach.params)}>

@@ -12,7 +12,9 @@ export function UndoLine() {
   return (
     <p className="flex items-center justify-between gap-3 border-t-1 border-hair pt-1 text-field text-quiet">
       <span className="min-w-0 truncate">{t("undo.recorded", { what: t(`undo.what.${last.type}`) })}</span>
-      <LinkButton onClick={() => void recordAndGoOn([command("event.undone", { of: last.id })])}>{t("undo.takeBack")}</LinkButton>
+      <LinkButton onClick={() => void recordAndGoOn([command("event.undone", { of: last.id })])}>
+        {t("undo.takeBack")}
+      </LinkButton>
     </p>
   );
 }

@@ -31,7 +31,9 @@ export function CheckScreen() {
   if (!node) return <Navigate to={paths.diagnosis.causes(diagnosisId)} replace />;
   if (node.kind === "do") return <DoStep key={node.id} node={node} />;
   if (node.kind === "hand-over") return <HandOver key={node.id} node={node} />;
-  if (node.kind === "conclude") return <Navigate to={paths.diagnosis.conclude(diagnosisId, node.fault)} replace />;
-  if (isAsking(node) && isCheckId(node.check)) return <CheckPage key={node.id} check={node.check} node={node} />;
+  if (node.kind === "conclude")
+    return <Navigate to={paths.diagnosis.conclude(diagnosisId, node.fault)} replace />;
+  if (isAsking(node) && isCheckId(node.check))
+    return <CheckPage key={node.id} check={node.check} node={node} />;
   return <Navigate to={paths.diagnosis.causes(diagnosisId)} replace />;
 }

@@ -26,7 +26,8 @@ export function DoorScreen() {
   const { answered } = doorProgress(state);
   const onRoof = profile.codes.location === "RTU";
 
-  const answer = (body: Command["body"] & { question: string }) => void recordAndGoOn([{ type: "door.answered", body } as Command]);
+  const answer = (body: Command["body"] & { question: string }) =>
+    void recordAndGoOn([{ type: "door.answered", body } as Command]);
   const peopleWell = people && !people.unwell && !people.alarm && (people.coPpm ?? 0) === 0;
   const time = (at: number | undefined) => (at === undefined ? undefined : format(at, "HH:mm"));
 
@@ -35,7 +36,15 @@ export function DoorScreen() {
     return (
       <KeypadSheet
         title={t(isCo ? "door.coTitle" : "door.lelTitle")}
-        hint={t(isCo ? (onRoof ? "door.coWhereRoof" : "door.coWhere") : profile.codes.fuel === "LP" ? "door.lelFloor" : "door.lelCeiling")}
+        hint={t(
+          isCo
+            ? onRoof
+              ? "door.coWhereRoof"
+              : "door.coWhere"
+            : profile.codes.fuel === "LP"
+              ? "door.lelFloor"
+              : "door.lelCeiling",
+        )}
         unit={isCo ? "ppm" : "% LEL"}
         label={t(isCo ? "door.coLabel" : "door.lelLabel")}
         limits={{ least: 0, most: isCo ? 2000 : 100 }}
@@ -58,10 +67,16 @@ export function DoorScreen() {
       door={{ answered, of: 3 }}
       stopped={openStops(state).length > 0}
     >
-      <h1 className="border-b-1 border-hair pb-3 text-question short:pb-1.5 short:text-[1.375rem] short:leading-6.5">{t("door.title")}</h1>
+      <h1 className="border-b-1 border-hair pb-3 text-question short:pb-1.5 short:text-[1.375rem] short:leading-6.5">
+        {t("door.title")}
+      </h1>
       <RefusalNote />
       <Question number={1} text={t("door.people")}>
-        <AnswerButton chosen={peopleWell === true} aside={time(people?.at)} onChoose={() => answer({ question: "people", unwell: false, alarm: false, coPpm: 0 })}>
+        <AnswerButton
+          chosen={peopleWell === true}
+          aside={time(people?.at)}
+          onChoose={() => answer({ question: "people", unwell: false, alarm: false, coPpm: 0 })}
+        >
           {t("door.peopleWell")}
         </AnswerButton>
         <div className="grid grid-cols-[3fr_2fr_2fr] gap-2">
@@ -94,7 +109,11 @@ export function DoorScreen() {
         </div>
       </Question>
       <Question number={3} text={t(onRoof ? "door.wayInRoof" : "door.wayIn")} last>
-        <AnswerButton chosen={wayIn?.safe === true} aside={time(wayIn?.at)} onChoose={() => answer({ question: "way-in", safe: true })}>
+        <AnswerButton
+          chosen={wayIn?.safe === true}
+          aside={time(wayIn?.at)}
+          onChoose={() => answer({ question: "way-in", safe: true })}
+        >
           {t("door.yes")}
         </AnswerButton>
         <PlainButton compact onClick={() => answer({ question: "way-in", safe: false })}>
@@ -106,9 +125,22 @@ export function DoorScreen() {
   );
 }
 
-function Question({ number, text, last, children }: { number: number; text: string; last?: boolean; children: React.ReactNode }) {
+function Question({
+  number,
+  text,
+  last,
+  children,
+}: {
+  number: number;
+  text: string;
+  last?: boolean;
+  children: React.ReactNode;
+}) {
   return (
-    <section aria-label={text} className={`flex flex-col gap-2 ${last ? "" : "border-b-1 border-hair pb-3 short:pb-2"}`}>
+    <section
+      aria-label={text}
+      className={`flex flex-col gap-2 ${last ? "" : "border-b-1 border-hair pb-3 short:pb-2"}`}
+    >
       <h2 className="flex gap-3 text-field font-semibold">
         <span className="numeric">{number}</span>
         {text}
@@ -117,4 +149,3 @@ function Question({ number, text, last, children }: { number: number; text: stri
     </section>
   );
 }
-

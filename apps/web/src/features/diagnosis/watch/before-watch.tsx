@@ -76,8 +76,19 @@ export function BeforeWatch() {
       {needsWait && (
         <section className="flex flex-col gap-3 border-t-2 border-ink pt-3" aria-label={t("watch.clearOut")}>
           <h2 className="text-field font-semibold">{t("watch.clearOut")}</h2>
-          <StepTimer label={t("watch.gasShut")} seconds={CLEAR_OUT_S} since={shutSince} onStart={() => setShutSince(Date.now())} />
-          <ReadingField compact label={t("watch.lelBurnerBox")} unit="% LEL" text={burnerBox} onChange={setBurnerBox} />
+          <StepTimer
+            label={t("watch.gasShut")}
+            seconds={CLEAR_OUT_S}
+            since={shutSince}
+            onStart={() => setShutSince(Date.now())}
+          />
+          <ReadingField
+            compact
+            label={t("watch.lelBurnerBox")}
+            unit="% LEL"
+            text={burnerBox}
+            onChange={setBurnerBox}
+          />
           <ReadingField compact label={t("watch.lelVent")} unit="% LEL" text={vent} onChange={setVent} />
         </section>
       )}

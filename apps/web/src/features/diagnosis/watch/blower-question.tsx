@@ -10,12 +10,24 @@ import { useUnitLine } from "../parts/use-unit-line.ts";
  * Asked once where the unit stays at the inducer: on many boards an open limit or rollout runs inducer and
  * blower together, so a running inducer does not prove the safeties.
  */
-export function BlowerQuestion({ onAnswer, onBack }: { onAnswer: (blower: boolean) => void; onBack: () => void }) {
+export function BlowerQuestion({
+  onAnswer,
+  onBack,
+}: {
+  onAnswer: (blower: boolean) => void;
+  onBack: () => void;
+}) {
   const { t } = useTranslation();
   const { diagnosisId, state } = useDiagnosis();
   const unitLine = useUnitLine();
   return (
-    <FieldLayout diagnosisId={diagnosisId} state={state} title={t("watch.header")} subtitle={unitLine} notch="safeties">
+    <FieldLayout
+      diagnosisId={diagnosisId}
+      state={state}
+      title={t("watch.header")}
+      subtitle={unitLine}
+      notch="safeties"
+    >
       <h1 className="text-question">{t("watch.blowerQuestion")}</h1>
       <RefusalNote />
       <AnswerButton onChoose={() => onAnswer(false)}>{t("watch.blowerNo")}</AnswerButton>

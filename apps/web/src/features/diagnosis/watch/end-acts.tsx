@@ -75,7 +75,10 @@ export function EndActs({
     <div className="flex flex-col gap-1">
       {elapsed < purgeEnds ? (
         <p className="rounded border-2 border-rule px-3 py-2 text-field text-quiet">
-          {t("watch.armsAt", { act: t(source === "spark" ? "watch.noSpark" : "watch.noGlow"), time: formatClock(purgeEnds) })}
+          {t("watch.armsAt", {
+            act: t(source === "spark" ? "watch.noSpark" : "watch.noGlow"),
+            time: formatClock(purgeEnds),
+          })}
         </p>
       ) : (
         <PrimaryButton onClick={() => onEnd("no-glow")} detail={t("watch.noGlowDetail")}>

@@ -37,10 +37,7 @@ export function RunningWatch({ watch }: { watch: Watch }) {
 
   if (asksBlower) {
     return (
-      <BlowerQuestion
-        onAnswer={(blower) => end(asksBlower, blower)}
-        onBack={() => setAsksBlower(null)}
-      />
+      <BlowerQuestion onAnswer={(blower) => end(asksBlower, blower)} onBack={() => setAsksBlower(null)} />
     );
   }
 
@@ -87,7 +84,10 @@ export function RunningWatch({ watch }: { watch: Watch }) {
               between={rungs.filter(
                 (rung) =>
                   rung.number < (rungs.find((candidate) => candidate.stage === stage)?.number ?? 0) &&
-                  rung.number > (below ? (rungs.find((candidate) => candidate.stage === stageOfSight(below))?.number ?? 0) : 0),
+                  rung.number >
+                    (below
+                      ? (rungs.find((candidate) => candidate.stage === stageOfSight(below))?.number ?? 0)
+                      : 0),
               )}
               onSee={() => see(sight)}
             />
@@ -98,8 +98,13 @@ export function RunningWatch({ watch }: { watch: Watch }) {
   );
 }
 
-type End = "flame-lost" | "no-flame" | "no-glow" | "nothing" | "stopped" | "locked-out" | "limit-cut" | "satisfied";
+type End =
+  "flame-lost" | "no-flame" | "no-glow" | "nothing" | "stopped" | "locked-out" | "limit-cut" | "satisfied";
 
 function endCommand(how: End, atS: number, blowerWithInducer?: boolean) {
-  return command("watch.ended", { how, atS, ...(blowerWithInducer === undefined ? {} : { blowerWithInducer }) });
+  return command("watch.ended", {
+    how,
+    atS,
+    ...(blowerWithInducer === undefined ? {} : { blowerWithInducer }),
+  });
 }

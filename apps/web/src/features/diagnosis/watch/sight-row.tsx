@@ -29,7 +29,13 @@ export function SightRow({
 }) {
   const { t } = useTranslation();
   const seen = seenAtS !== undefined;
-  const state = seen ? formatClock(seenAtS) : isUnder ? t("watch.passed") : isNext && due ? dueWord(t, due, elapsed) : "";
+  const state = seen
+    ? formatClock(seenAtS)
+    : isUnder
+      ? t("watch.passed")
+      : isNext && due
+        ? dueWord(t, due, elapsed)
+        : "";
   return (
     <li className="flex flex-col">
       <button
@@ -38,14 +44,28 @@ export function SightRow({
         disabled={seen}
         className="flex min-h-14 items-center gap-3 px-3 text-left text-[1.25rem] font-semibold text-ink"
       >
-        <svg viewBox="0 0 34 22" width={34} height={22} fill="none" stroke="currentColor" strokeWidth={2} className="shrink-0" aria-hidden="true">
+        <svg
+          viewBox="0 0 34 22"
+          width={34}
+          height={22}
+          fill="none"
+          stroke="currentColor"
+          strokeWidth={2}
+          className="shrink-0"
+          aria-hidden="true"
+        >
           <path d="M2 11C8 3 26 3 32 11 26 19 8 19 2 11z" />
           <circle cx={17} cy={11} r={4.5} fill="currentColor" />
         </svg>
         <span className="grow">{t(`watch.sights.${sight}`)}</span>
         <span className={seen ? "numeric" : "text-field font-normal"}>{state}</span>
       </button>
-      <svg viewBox="0 0 300 12" preserveAspectRatio="none" className="h-3 w-full overflow-visible" aria-hidden="true">
+      <svg
+        viewBox="0 0 300 12"
+        preserveAspectRatio="none"
+        className="h-3 w-full overflow-visible"
+        aria-hidden="true"
+      >
         {seen ? (
           <>
             <path d="M-8 6h316" stroke="var(--glow)" strokeWidth={14} />
@@ -59,7 +79,11 @@ export function SightRow({
         <div className="flex flex-col gap-1.5 py-1" aria-hidden="true">
           {between.map((rung) => (
             <svg key={rung.stage} viewBox="0 0 300 8" preserveAspectRatio="none" className="h-2 w-full">
-              <path d="M0 4h300" stroke={rung.state === "waiting" ? "var(--rule)" : "var(--proven)"} strokeWidth={rung.state === "waiting" ? 1.5 : 2.4} />
+              <path
+                d="M0 4h300"
+                stroke={rung.state === "waiting" ? "var(--rule)" : "var(--proven)"}
+                strokeWidth={rung.state === "waiting" ? 1.5 : 2.4}
+              />
             </svg>
           ))}
         </div>
@@ -68,7 +92,11 @@ export function SightRow({
   );
 }
 
-function dueWord(t: (key: string, values?: Record<string, unknown>) => string, due: Span, elapsed: number): string {
+function dueWord(
+  t: (key: string, values?: Record<string, unknown>) => string,
+  due: Span,
+  elapsed: number,
+): string {
   if (elapsed < due.least) return t("watch.dueFrom", { time: formatClock(due.least) });
   return elapsed <= due.most ? t("watch.dueNow") : t("watch.late");
 }

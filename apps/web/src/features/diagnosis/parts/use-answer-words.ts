@@ -1,0 +1,48 @@
+import type { Look, Observation } from "@emberladder/diagnosis";
+import { format } from "date-fns";
+import { useTranslation } from "react-i18next";
+import { formatNumber } from "#lib/format-number.ts";
+
+/** What an answer says, in words: what was taken, its value or finding, the unit's state and the time. */
+export interface AnswerWords {
+  what: string;
+  value: string;
+  state: string;
+}
+
+/** Words of readings and looks, for lists of evidence and for checking answers. */
+export function useAnswerWords() {
+  const { t } = useTranslation();
+  const findingWord = (check: string, finding: string) =>
+    t([`trade:findings.${check}.${finding}`, `check.findings.${finding}`]);
+  const ofObservation = (one: Observation): AnswerWords => {
+    const reading =
+      one.inV !== undefined
+        ? t("inOut.values", {
+            inV: formatNumber(one.inV),
+            outV: one.outV === undefined ? "-" : formatNumber(one.outV),
+          })
+        : one.value !== undefined
+          ? `${one.value === "OL" ? "OL" : formatNumber(one.value)} ${one.unit ? t(`trade:units.${one.unit}`) : ""}`
+          : "";
+    const finding = one.finding ? findingWord(one.check, one.finding) : "";
+    return {
+      what: t(`trade:checks.${one.check}.title`),
+      value:
+        [reading, finding].filter(Boolean).join(", ") || (one.outcome ? t(`check.zones.${one.outcome}`) : ""),
+      state: t("conclude.readState", {
+        state: t(`unitState.short.${one.power}`),
+        time: format(one.at, "HH:mm"),
+      }),
+    };
+  };
+  const ofLook = (look: Look): AnswerWords => ({
+    what: t(`trade:firstLook.${look.item}.title`),
+    value:
+      look.check && look.finding
+        ? findingWord(look.check, look.finding)
+        : t(look.answer === "right" ? "check.zones.good" : "check.zones.fail"),
+    state: t("conclude.lookState", { time: format(look.at, "HH:mm") }),
+  });
+  return { ofObservation, ofLook };
+}

@@ -1,0 +1,68 @@
+import { command } from "@emberladder/diagnosis";
+import { useTranslation } from "react-i18next";
+import { Link } from "react-router-dom";
+import { PrimaryButton } from "#components/ui/button.tsx";
+import { paths } from "#lib/paths.ts";
+import { useDiagnosis } from "../diagnosis-context.tsx";
+import { FieldLayout } from "../parts/field-layout.tsx";
+import { RefusalNote } from "../parts/refusal-note.tsx";
+import { useUnitLine } from "../parts/use-unit-line.ts";
+
+/** Complaint and unit as they came with the call: right in one tap, or the unit corrected from its plate. */
+export function ConfirmScreen() {
+  const { t } = useTranslation();
+  const { diagnosisId, state, profile, call, recordAndGoOn } = useDiagnosis();
+  const unitLine = useUnitLine();
+  const { codes, plate } = profile;
+  const facts = [
+    t(`trade:codes.ignition.${codes.ignition}`),
+    t(`trade:codes.draft.${codes.draft}`),
+    t(`trade:codes.staging.${codes.staging}`),
+    t(`trade:codes.control.${codes.control}`),
+    t(`trade:codes.fuel.${codes.fuel}`),
+    t(`trade:codes.location.${codes.location}`),
+  ];
+  const figures = [
+    plate.inputBtuh && t("confirm.input", { value: plate.inputBtuh.toLocaleString("en-US") }),
+    plate.switchMakeInwc && t("confirm.switchMake", { value: plate.switchMakeInwc }),
+    plate.riseMinF && plate.riseMaxF && t("confirm.rise", { least: plate.riseMinF, most: plate.riseMaxF }),
+    plate.dropOutUa && t("confirm.dropOut", { value: plate.dropOutUa }),
+  ].filter(Boolean);
+  return (
+    <FieldLayout
+      diagnosisId={diagnosisId}
+      state={state}
+      title={t("confirm.header")}
+      subtitle={unitLine}
+      pinned={
+        <PrimaryButton onClick={() => void recordAndGoOn([command("unit.confirmed", {})])}>
+          {t("confirm.right")}
+        </PrimaryButton>
+      }
+    >
+      <h1 className="text-question">{t("confirm.title")}</h1>
+      <RefusalNote />
+      {call && (
+        <blockquote className="border-l-6 border-ink bg-surface p-3 text-field">
+          <p>{call.complaint}</p>
+        </blockquote>
+      )}
+      <ul className="flex flex-col divide-y-1 divide-hair border-y-1 border-hair text-field">
+        {[...facts, ...figures].map((fact) => (
+          <li key={String(fact)} className="py-1.5">
+            {fact}
+          </li>
+        ))}
+      </ul>
+      <p className="text-field text-quiet">{t("confirm.plateOutranks")}</p>
+      {call && (
+        <Link
+          to={`${paths.editUnit(call.unit.id)}?diagnosis=${diagnosisId}`}
+          className="text-field font-semibold"
+        >
+          {t("confirm.correct")}
+        </Link>
+      )}
+    </FieldLayout>
+  );
+}
