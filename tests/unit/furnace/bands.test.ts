@@ -75,7 +75,7 @@ describe("the chains of bands", () => {
 
   it("are a partition: every number, the edges and infinity are in exactly one class, on every unit", () => {
     const bands = resolveAll();
-    expect(bands.length).toBeGreaterThan(150);
+    expect(bands.length).toBeGreaterThan(97);
     for (const band of bands) {
       const edges = band.segments.flatMap(({ from, to }) => [from, to]).filter(Number.isFinite);
       const probes = [-Infinity, Infinity, 0, ...edges.flatMap((edge) => [edge, edge - 1e-7, edge + 1e-7])];
