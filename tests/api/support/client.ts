@@ -7,8 +7,8 @@ export interface TestAnswer {
   status: number;
   headers: Headers;
   text: string;
-  /** The body as JSON, of whatever shape the test expects. */
-  json: <T = Record<string, unknown>>() => T;
+  /** The body as JSON, of the shape the test expects; for no body, the given one. */
+  json: <T = Record<string, unknown>>(forEmpty?: T) => T;
   /** The code of a problem document. */
   code: string | undefined;
 }
@@ -20,7 +20,10 @@ export interface TestClient {
     request?: { params?: Record<string, string>; query?: Record<string, string>; body?: unknown },
   ) => Promise<TestAnswer>;
   /** Sends any request, with this client's cookie and the product's own origin unless told otherwise. */
-  send: (path: string, init?: RequestInit & { headers?: Record<string, string> }) => Promise<TestAnswer>;
+  send: (
+    path: string,
+    init?: Omit<RequestInit, "headers"> & { headers?: Record<string, string> },
+  ) => Promise<TestAnswer>;
   cookie: string | undefined;
 }
 
@@ -55,7 +58,8 @@ export function createClient(server: TestServer, cookie?: string): TestClient {
         status: response.status,
         headers: response.headers,
         text,
-        json: <T>() => JSON.parse(text) as T,
+        json: <T>(forEmpty?: T) =>
+          text === "" && forEmpty !== undefined ? forEmpty : (JSON.parse(text) as T),
         code: response.headers.get("content-type")?.includes("problem")
           ? (JSON.parse(text) as Problem).code
           : undefined,

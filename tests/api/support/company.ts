@@ -35,7 +35,9 @@ export interface TestCompany {
 }
 
 /** The unit profile used in tests: a direct hot-surface unit with an integrated board, invented. */
-export const testProfile = demoCalls[0]!.profile;
+const [firstDemoCall] = demoCalls;
+if (!firstDemoCall) throw new Error("The demo has calls.");
+export const testProfile = firstDemoCall.profile;
 
 /** Makes a company. Its names are its own, so that tests never meet each other. */
 export async function makeCompany(

@@ -1,7 +1,7 @@
 import type { Role } from "@emberladder/contract";
 import { companies, devices, events, people, sessions, totpUsedSteps, recoveryCodes } from "@emberladder/db";
 import type { Queryable } from "@emberladder/db";
-import { and, desc, eq, gt, isNull, max, ne } from "drizzle-orm";
+import { and, desc, eq, gt, isNull, lt, max, ne } from "drizzle-orm";
 
 /** What sign-in and the account routes know of a person. */
 export interface AccountRow {
@@ -183,4 +183,9 @@ export async function spendRecoveryCode(
       ),
     );
   return result.affectedRows === 1;
+}
+
+/** Removes sessions past their absolute limit. */
+export async function deleteOverSessions(db: Queryable, now: Date): Promise<void> {
+  await db.delete(sessions).where(lt(sessions.expiresAt, now));
 }

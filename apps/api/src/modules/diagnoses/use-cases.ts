@@ -1,6 +1,6 @@
 import type { DiagnosisDetail, Flag, InputOf, listDiagnoses } from "@emberladder/contract";
 import { inTransaction } from "@emberladder/db";
-import { verifyRecord } from "@emberladder/diagnosis";
+
 import type { Actor } from "#http/actor.ts";
 import { ApiError, found } from "#http/api-error.ts";
 import type { RequestContext } from "#http/route.ts";
@@ -13,6 +13,7 @@ import { eraseNoteText, findNote, listNames } from "./notes/repository.ts";
 import { presentSummary } from "./present-diagnosis.ts";
 import { presentNotes } from "./present-notes.ts";
 import { endWaiting, listFlagsOf } from "./repository.ts";
+import { verifyStoredRecord } from "./verify-stored-record.ts";
 import { findSummary, listSummaries } from "./summaries/repository.ts";
 
 type Context = RequestContext<Actor>;
@@ -52,7 +53,7 @@ export async function readDiagnosisDetail(
     listFlagsOf(database, companyId, diagnosisId),
   ]);
   const events = eventRows.map(readStoredEvent);
-  const breaks = verifyRecord(events);
+  const breaks = verifyStoredRecord(events);
   const names = await listNames(
     database,
     events.map(({ actorId }) => actorId),
