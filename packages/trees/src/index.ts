@@ -1,2 +1,3 @@
 export * from "./document.ts";
 export * from "./walk-tree.ts";
+export * from "./published/hot-surface-induced.ts";
