@@ -156,9 +156,16 @@ const STOPPED: Record<StoppedWork, readonly Work[]> = {
   firing: ["call-for-heat"],
 };
 
-/** The open stop rule that stops a kind of work; undefined where none does. */
+/**
+ * The open stop rule that stops a kind of work; undefined where none does. A rule against firing lets a call be
+ * watched while the gas is recorded shut: nothing can burn then.
+ */
 export function stopFor(state: DiagnosisState, work: Work): MetStop | undefined {
-  return openStops(state).find((stop) => STOPPED[stop.stops].includes(work));
+  return openStops(state).find(
+    (stop) =>
+      STOPPED[stop.stops].includes(work) &&
+      !(stop.stops === "firing" && work === "call-for-heat" && state.unit.gas === "shut"),
+  );
 }
 
 /**

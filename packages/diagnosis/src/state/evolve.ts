@@ -92,7 +92,7 @@ function apply(state: DiagnosisState, event: EventBody, trace: Trace): Diagnosis
       };
     case "watch.started":
       return {
-        ...setUnit(state, { power: "on", gas: "open", calling: true }),
+        ...setUnit(state, { power: "on", calling: true }),
         watches: [...state.watches, { ...trace, ...event.body, seen: [] }],
       };
     case "watch.seen":
