@@ -1,14 +1,17 @@
+import { stepOf } from "@emberladder/diagnosis";
 import type { Command, NoteText, Refusal } from "@emberladder/diagnosis";
 import { useCallback, useEffect, useMemo, useState, useSyncExternalStore } from "react";
-import { Outlet, useNavigate, useParams } from "react-router-dom";
+import { useMachine } from "@xstate/react";
+import { Outlet, useLocation, useNavigate, useParams } from "react-router-dom";
 import { useTranslation } from "react-i18next";
+import { paths } from "#lib/paths.ts";
 import { useMe } from "#lib/session.tsx";
 import { DiagnosisContext } from "./diagnosis-context.tsx";
 import type { DiagnosisWork } from "./diagnosis-context.tsx";
 import { loadDiagnosis } from "./load-diagnosis.ts";
 import type { LoadedDiagnosis } from "./load-diagnosis.ts";
 import { MissingDiagnosis } from "./parts/missing-diagnosis.tsx";
-import { pathOfNext } from "./walk-machine.ts";
+import { givesWayToStop, pathOfNext, walkMachine } from "./walk-machine.ts";
 
 /** Opens a diagnosis from this phone, or from the server where this phone does not have it. */
 export function DiagnosisRoute() {
@@ -37,6 +40,17 @@ function OpenDiagnosis({ loaded }: { loaded: LoadedDiagnosis }) {
   const state = useSyncExternalStore(session.subscribe, session.getState);
   const [refusal, setRefusal] = useState<Refusal | null>(null);
   const navigate = useNavigate();
+  const { pathname } = useLocation();
+  const [openedAt] = useState(() => Date.now());
+  const step = stepOf(state, tree, openedAt);
+  const [walk, send] = useMachine(walkMachine, { input: { step } });
+  useEffect(() => send({ type: "folded", step }), [send, step]);
+  const screen = pathname.split("/").at(-1) ?? "";
+  const stopped = walk.matches("stopped");
+  useEffect(() => {
+    if (stopped && givesWayToStop(screen))
+      void navigate(paths.diagnosis.stop(diagnosisId), { replace: true });
+  }, [stopped, screen, navigate, diagnosisId]);
 
   const record = useCallback(
     async (commands: readonly Command[], notes?: readonly NoteText[]) => {

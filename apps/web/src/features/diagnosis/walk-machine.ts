@@ -1,13 +1,13 @@
 import { stepOf } from "@emberladder/diagnosis";
 import type { DiagnosisState, WalkStep } from "@emberladder/diagnosis";
 import type { TreeDocument } from "@emberladder/trees";
-import { assign, createActor, setup } from "xstate";
+import { assign, setup } from "xstate";
 import { paths } from "#lib/paths.ts";
 
 /**
- * Navigation of the walk: which screen follows. The machine holds no truth of its own; it is built from the
- * folded state each time and never stored. The step is the fold's; the machine adds the one thing a person
- * may choose: to look at another screen first and come back.
+ * Navigation of the walk. The machine holds no truth of its own: it is fed the step that the fold gives and is
+ * never stored. It knows one thing more than the fold: a stop rule takes the walk away from whatever screen is
+ * open, and gives it back when its acts are done.
  */
 export const walkMachine = setup({
   types: {
@@ -24,20 +24,14 @@ export const walkMachine = setup({
   id: "walk",
   context: ({ input }) => ({ step: input.step }),
   initial: "walking",
-  states: {
-    walking: {
-      on: {
-        folded: [
-          { guard: "isStop", target: "stopped", actions: "remember" },
-          { guard: "isDone", target: "ended", actions: "remember" },
-          { actions: "remember" },
-        ],
-      },
-    },
-    // A stop rule takes the walk away from wherever it was, and gives it back when its acts are done.
-    stopped: { on: { folded: { target: "walking", actions: "remember" } } },
-    ended: { on: { folded: { actions: "remember" } } },
+  on: {
+    folded: [
+      { guard: "isStop", target: ".stopped", actions: "remember" },
+      { guard: "isDone", target: ".ended", actions: "remember" },
+      { target: ".walking", actions: "remember" },
+    ],
   },
+  states: { walking: {}, stopped: {}, ended: {} },
 });
 
 const PATH_OF_STEP: Record<WalkStep, (diagnosisId: string) => string> = {
@@ -56,12 +50,15 @@ const PATH_OF_STEP: Record<WalkStep, (diagnosisId: string) => string> = {
   done: (id) => `/diagnoses/${id}/done`,
 };
 
+/** Screens that stay open while a stop rule is: its own, the ways to end, and what only shows. */
+const OPEN_WHILE_STOPPED = ["stop", "close", "safety", "ladder", "put-back", "check", "checks"];
+
+/** Whether a screen gives way to the stop screen. */
+export function givesWayToStop(screen: string): boolean {
+  return !OPEN_WHILE_STOPPED.includes(screen);
+}
+
 /** The address of the screen for the next step of a diagnosis. */
 export function pathOfNext(diagnosisId: string, state: DiagnosisState, tree: TreeDocument | null): string {
-  const step = stepOf(state, tree, Date.now());
-  const actor = createActor(walkMachine, { input: { step } }).start();
-  actor.send({ type: "folded", step });
-  const next = actor.getSnapshot().context.step;
-  actor.stop();
-  return PATH_OF_STEP[next](diagnosisId);
+  return PATH_OF_STEP[stepOf(state, tree, Date.now())](diagnosisId);
 }

@@ -1,4 +1,5 @@
 import { field } from "./field.ts";
+import { review } from "./review.ts";
 import { rules } from "./rules.ts";
 
 /** The screens' own words in English. Trade words (checks, faults, rungs) are in `@emberladder/words`. */
@@ -87,5 +88,6 @@ export const ui = {
     safety: "Smell gas? CO alarm?",
   },
   ...field,
+  review,
   rules,
 } as const;
