@@ -5,6 +5,7 @@ import { eq } from "drizzle-orm";
 import type { Database, Transaction } from "../client.ts";
 import { sealSecret } from "../sealed-secret.ts";
 import { calls, companies, customers, people, sites, units } from "../schema/index.ts";
+import { installShippedTrees } from "../shipped-trees.ts";
 import { inTransaction } from "../transaction.ts";
 import { demoCalls } from "./demo-calls.ts";
 import { demoId } from "./demo-id.ts";
@@ -50,7 +51,10 @@ export async function seedDemo(sources: SeedSources): Promise<DemoAccount[]> {
       prepared.push({ company, person, secrets });
     }
   await inTransaction(database, async (tx) => {
-    for (const company of demoCompanies) await seedCompany(tx, company, sources.now);
+    for (const company of demoCompanies) {
+      await seedCompany(tx, company, sources.now);
+      await installShippedTrees(tx, demoId("company", company.slug), sources.now);
+    }
     for (const { company, person, secrets } of prepared)
       await seedPerson(tx, company, person, secrets, sources.now);
     for (const [index, call] of demoCalls.entries())

@@ -1,5 +1,5 @@
 import type { finishFirstRun, InputOf } from "@emberladder/contract";
-import { inTransaction } from "@emberladder/db";
+import { inTransaction, installShippedTrees } from "@emberladder/db";
 import { ApiError } from "#http/api-error.ts";
 import type { Dependencies } from "#http/dependencies.ts";
 import type { RequestContext } from "#http/route.ts";
@@ -67,6 +67,7 @@ export async function setUpInstallation(
     if (!(await spendLink(tx, "first-run", tokenHash, now))) throw new ApiError("link-expired");
     if ((await countCompanies(tx)) > 0) throw new ApiError("already-set-up");
     await insertCompany(tx, company);
+    await installShippedTrees(tx, company.id, now);
     await insertPerson(tx, {
       id: personId,
       companyId: company.id,
