@@ -13,7 +13,9 @@ export function rememberLastDeviceId(deviceId: string): void {
 /** A name for the list of devices, from what the browser says of itself. */
 export function describeDevice(): string {
   const agent = navigator.userAgent;
-  const system = ["Android", "iPhone", "iPad", "Windows", "Mac OS", "Linux"].find((name) => agent.includes(name));
+  const system = ["Android", "iPhone", "iPad", "Windows", "Mac OS", "Linux"].find((name) =>
+    agent.includes(name),
+  );
   const browser = ["Firefox", "Edg", "Chrome", "Safari"].find((name) => agent.includes(name));
   return [system ?? "Device", browser === "Edg" ? "Edge" : browser].filter(Boolean).join(", ");
 }

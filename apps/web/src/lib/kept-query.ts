@@ -56,5 +56,7 @@ async function recall<T>(key: string): Promise<Kept<T> | undefined> {
   const { readDocument } = await loadDocuments();
   const value = await readDocument(key);
   const keptAt = await readDocument(`at:${key}`);
-  return value === undefined ? undefined : { value: value as T, keptAt: typeof keptAt === "number" ? keptAt : 0 };
+  return value === undefined
+    ? undefined
+    : { value: value as T, keptAt: typeof keptAt === "number" ? keptAt : 0 };
 }

@@ -9,12 +9,17 @@ const parts = (moment: Moment, timeZone: string, options: Intl.DateTimeFormatOpt
 
 /** The clock at the site, such as `08:30`. */
 export function formatTime(moment: Moment, timeZone: string): string {
-  return new Intl.DateTimeFormat("en-GB", { timeZone, hour: "2-digit", minute: "2-digit" }).format(new Date(moment));
+  return new Intl.DateTimeFormat("en-GB", { timeZone, hour: "2-digit", minute: "2-digit" }).format(
+    new Date(moment),
+  );
 }
 
 /** The abbreviation of the site's time zone at that moment, such as `MST`. */
 export function zoneName(moment: Moment, timeZone: string): string {
-  return parts(moment, timeZone, { timeZoneName: "short" }).find((part) => part.type === "timeZoneName")?.value ?? "";
+  return (
+    parts(moment, timeZone, { timeZoneName: "short" }).find((part) => part.type === "timeZoneName")?.value ??
+    ""
+  );
 }
 
 /** A day, such as `14 Nov`, with the year where it is not the present one. */
@@ -61,9 +66,10 @@ export function addDays(day: string, days: number): string {
  */
 export function momentAtSite(day: string, time: string, timeZone: string): string {
   const wanted = Date.parse(`${day}T${time}:00Z`);
-  const offsetAt = (moment: number) => Date.parse(`${dayOf(moment, timeZone)}T${formatTime(moment, timeZone)}:00Z`) - moment;
-  const guess = wanted - offsetAt(wanted - offsetAt(wanted));
-  const earlier = wanted - offsetAt(guess - 3_600_000);
-  const isExact = (moment: number) => moment + offsetAt(moment) === wanted;
-  return new Date(isExact(earlier) && earlier < guess ? earlier : guess).toISOString();
+  const offsetAt = (moment: number) =>
+    Date.parse(`${dayOf(moment, timeZone)}T${formatTime(moment, timeZone)}:00Z`) - moment;
+  // No zone changes its clock twice within two days, so the offset is the one before or the one after.
+  const [before, after] = [offsetAt(wanted - 86_400_000), offsetAt(wanted + 86_400_000)];
+  const shown = [wanted - before, wanted - after].filter((moment) => moment + offsetAt(moment) === wanted);
+  return new Date(shown.length > 0 ? Math.min(...shown) : wanted - before).toISOString();
 }

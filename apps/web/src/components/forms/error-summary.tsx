@@ -1,0 +1,44 @@
+import type { Ref } from "react";
+import { useTranslation } from "react-i18next";
+import { useControlId } from "./form.tsx";
+import type { FormError } from "./list-errors.ts";
+
+/** What has to be mended before a form can be sent, on top of it, with a link to each field. */
+export function ErrorSummary({ errors, ref }: { errors: readonly FormError[]; ref: Ref<HTMLDivElement> }) {
+  const { t } = useTranslation();
+  return (
+    <div
+      ref={ref}
+      role="alert"
+      tabIndex={-1}
+      className="border-l-6 border-ink bg-surface p-4 text-field outline-offset-2 desk:text-desk"
+    >
+      <h2 className="mb-1 font-semibold">{t("desk:form.summary")}</h2>
+      <ul className="flex flex-col">
+        {errors.map((error) => (
+          <li key={`${error.name} ${error.message}`}>
+            {error.name === null ? error.message : <FieldLink name={error.name} message={error.message} />}
+          </li>
+        ))}
+      </ul>
+    </div>
+  );
+}
+
+function FieldLink({ name, message }: { name: string; message: string }) {
+  const id = useControlId(name);
+  return (
+    <a
+      href={`#${id}`}
+      className="inline-flex min-h-12 items-center font-medium desk:min-h-8"
+      onClick={(event) => {
+        event.preventDefault();
+        const control = document.getElementById(id);
+        control?.scrollIntoView({ block: "center" });
+        control?.focus({ preventScroll: true });
+      }}
+    >
+      {message}
+    </a>
+  );
+}

@@ -1,0 +1,124 @@
+import { zodResolver } from "@hookform/resolvers/zod";
+import { createContext, useContext, useEffect, useId, useRef, useState } from "react";
+import type { ReactNode } from "react";
+import { FormProvider, useForm } from "react-hook-form";
+import type { DefaultValues, FieldPath, FieldValues } from "react-hook-form";
+import { useTranslation } from "react-i18next";
+import type { z } from "zod";
+import { ApiProblem } from "#lib/api-client.ts";
+import { useProblemWords } from "#lib/problem-words.ts";
+import { ErrorSummary } from "./error-summary.tsx";
+import { listErrors } from "./list-errors.ts";
+import { SubmitButton } from "./submit-button.tsx";
+import { useIssueWords } from "./use-issue-words.ts";
+
+const FormIdContext = createContext("form");
+
+/** Id of a field's control, for its label, its messages and the links of the summary. */
+export function useControlId(name: string): string {
+  return `${useContext(FormIdContext)}-${name}`;
+}
+
+/**
+ * A form as the whole product has it: judged by a contract's schema when it is sent and never before, so that
+ * nobody is told off while typing. What was typed stays. Where something has to be mended, a summary comes on
+ * top with the focus and a link to each field, each field says it too, and the page's title begins with the
+ * word for error. Refusals of the server land in the same places. A second tap while sending does nothing.
+ */
+export function Form<Input extends FieldValues, Output>({
+  schema,
+  defaults,
+  submitLabel,
+  onSubmit,
+  aside,
+  children,
+}: {
+  schema: z.ZodType<Output, Input>;
+  defaults: DefaultValues<Input>;
+  /** Says what is stored or done. */
+  submitLabel: string;
+  /** @throws ApiProblem to have it shown; anything else is a fault of ours. */
+  onSubmit: (values: Output) => Promise<void>;
+  /** Second acts beside the button. */
+  aside?: ReactNode;
+  children: ReactNode;
+}) {
+  const { t } = useTranslation();
+  const formId = useId();
+  const issueWords = useIssueWords();
+  const problemWords = useProblemWords();
+  const [failures, setFailures] = useState(0);
+  const summary = useRef<HTMLDivElement>(null);
+  const sending = useRef(false);
+  const form = useForm<Input, unknown, Output>({
+    resolver: zodResolver<Input, unknown, Output>(schema, { error: issueWords }),
+    defaultValues: defaults,
+    mode: "onSubmit",
+    reValidateMode: "onSubmit",
+    shouldFocusError: false,
+  });
+  const errors = listErrors(form.formState.errors);
+  const hasErrors = errors.length > 0;
+
+  useEffect(() => {
+    if (failures > 0) summary.current?.focus();
+  }, [failures]);
+  useEffect(() => {
+    if (!hasErrors) return undefined;
+    const before = document.title;
+    document.title = t("desk:form.errorTitle", { title: before });
+    return () => {
+      document.title = before;
+    };
+  }, [hasErrors, t]);
+
+  const showProblem = (problem: unknown) => {
+    const fields = problem instanceof ApiProblem ? problem.fields : [];
+    for (const { path, message } of fields)
+      form.setError(path as FieldPath<Input>, { type: "server", message });
+    form.setError("root.server", { type: "server", message: problemWords(problem) });
+    setFailures((count) => count + 1);
+  };
+  const send = form.handleSubmit(
+    async (values) => {
+      try {
+        await onSubmit(values);
+      } catch (problem) {
+        showProblem(problem);
+      }
+    },
+    () => setFailures((count) => count + 1),
+  );
+  const submit = async () => {
+    if (sending.current) return;
+    sending.current = true;
+    try {
+      await send();
+    } finally {
+      sending.current = false;
+    }
+  };
+
+  return (
+    <FormIdContext value={formId}>
+      <FormProvider {...form}>
+        <form
+          noValidate
+          className="flex flex-col gap-5"
+          onSubmit={(event) => {
+            event.preventDefault();
+            event.stopPropagation();
+            void submit();
+          }}
+        >
+          {hasErrors && <ErrorSummary ref={summary} errors={errors} />}
+          {children}
+          <div className="flex flex-wrap items-center gap-4">
+            <SubmitButton busy={form.formState.isSubmitting}>{submitLabel}</SubmitButton>
+            {aside}
+          </div>
+        </form>
+      </FormProvider>
+    </FormIdContext>
+  );
+}
