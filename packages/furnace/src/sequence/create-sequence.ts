@@ -3,10 +3,13 @@ import { DRAFT_REST_S, DRAFT_WAIT_S, LIMIT_LOCKOUT_S, STEADY_S, timingOf } from 
 import { directIgnitionMachine, sequenceInput } from "./direct-ignition.ts";
 import type { SequenceTimer } from "./sequence-types.ts";
 
-/** Whether the sequence of this family is written: direct hot surface, pressure switch, integrated board. */
+/**
+ * Whether the sequence of this family is written: direct hot surface, pressure switch, integrated board, one or
+ * two stages.
+ */
 export function hasSequence(profile: UnitProfile): boolean {
-  const { ignition, draft, control } = profile.codes;
-  return ignition === "HSI" && draft === "IDP" && control === "IFC";
+  const { ignition, draft, control, staging } = profile.codes;
+  return ignition === "HSI" && draft === "IDP" && control === "IFC" && staging !== "MOD";
 }
 
 /** How long each of a unit's timers runs, in seconds: its label's figures, else the usual ones. */
@@ -14,6 +17,7 @@ export function timerSeconds(profile: UnitProfile): Record<SequenceTimer, number
   return {
     debounce: 1,
     startCheck: 1,
+    spinUp: 1,
     draftWait: DRAFT_WAIT_S.usual,
     draftPause: DRAFT_REST_S.usual,
     prepurge: timingOf(profile, "prepurgeS").usual,

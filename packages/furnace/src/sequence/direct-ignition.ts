@@ -1,73 +1,19 @@
-import { assign, setup } from "xstate";
 import type { UnitProfile } from "../profile.ts";
 import { DEFAULT_RECYCLES, DEFAULT_TRIES } from "../timings.ts";
-import type {
-  SequenceContext,
-  SequenceEvent,
-  SequenceMeta,
-  SequenceOutputs,
-  SequenceTimer,
-} from "./sequence-types.ts";
-import type { LastStage } from "../codes.ts";
-
-const OFF: SequenceOutputs = { inducer: "off", igniter: false, gas: "off" };
-const PURGING: SequenceOutputs = { ...OFF, inducer: "low" };
-const GLOWING: SequenceOutputs = { ...PURGING, igniter: true };
-const TRYING: SequenceOutputs = { ...GLOWING, gas: "low" };
-const BURNING: SequenceOutputs = { ...PURGING, gas: "low" };
-
-const meta = (completed: LastStage, outputs: SequenceOutputs, timer?: SequenceTimer): SequenceMeta => ({
-  completed,
-  outputs,
-  ...(timer ? { timer } : {}),
-});
-
-const directIgnition = setup({
-  types: {
-    context: {} as SequenceContext,
-    events: {} as SequenceEvent,
-    input: {} as SequenceContext,
-    meta: {} as SequenceMeta,
-  },
-  guards: {
-    isLimitOpen: ({ context }) => context.limitOpen,
-    isDraftClosed: ({ context }) => context.draftClosed,
-    isCalling: ({ context }) => context.calling,
-    hasTriesLeft: ({ context }) => context.tries + 1 < context.maxTries,
-    hasRecyclesLeft: ({ context }) => context.recycles < context.maxRecycles,
-    isTwoStage: ({ context }) => context.twoStage,
-    /** Propane settles low and does not clear by itself: no automatic restart. Common practice. */
-    locksHard: ({ context }) => context.fuel === "LP",
-  },
-  actions: {
-    callOn: assign({ calling: true }),
-    callOff: assign({ calling: false, highCall: false, tries: 0, recycles: 0 }),
-    limitOpens: assign({ limitOpen: true }),
-    limitCloses: assign({ limitOpen: false }),
-    draftOpens: assign({ draftClosed: false }),
-    draftCloses: assign({ draftClosed: true }),
-    countTry: assign({ tries: ({ context }) => context.tries + 1 }),
-    countRecycle: assign({ recycles: ({ context }) => context.recycles + 1, tries: 0 }),
-    startOver: assign({ tries: 0, recycles: 0 }),
-    blowerStarts: assign({ blower: "on" }),
-    blowerRunsOn: assign({
-      blower: ({ context }) => (context.blower === "on" ? "running-on" : context.blower),
-    }),
-    blowerStops: assign({
-      blower: ({ context }) => (context.blower === "running-on" ? "off" : context.blower),
-    }),
-    powerLost: assign({ tries: 0, recycles: 0, blower: "off", draftClosed: false }),
-    highCallOn: assign({ highCall: true }),
-    highCallOff: assign({ highCall: false }),
-  },
-});
-
-/** An open limit or rollout ends any of these states at once: gas off, inducer and blower on. */
-const cutByLimit = { "LIMIT.open": { target: "#limitOpen", actions: "limitOpens" } } as const;
-/** The call taken away before the gas: nothing has burned, so there is nothing to purge. */
-const endBeforeGas = { "CALL.off": { target: "#idle", actions: "callOff" } } as const;
-/** The draft switch opens: gas off at once, and the sequence starts again from the inducer. */
-const draftLost = { "DRAFT.open": { target: "#inducer", actions: "draftOpens" } } as const;
+import {
+  BURNING,
+  GLOWING,
+  OFF,
+  PURGING,
+  TRYING,
+  cutByLimit,
+  directIgnition,
+  draftLost,
+  endBeforeGas,
+  flameTooSoon,
+  meta,
+} from "./direct-ignition-control.ts";
+import type { SequenceContext } from "./sequence-types.ts";
 
 /**
  * The ignition sequence of a direct hot-surface unit with induced draft and an integrated board, one or two
@@ -91,6 +37,8 @@ export const directIgnitionMachine = directIgnition.createMachine({
     "LIMIT.closed": { actions: "limitCloses" },
     "DRAFT.open": { actions: "draftOpens" },
     "DRAFT.closed": { actions: "draftCloses" },
+    "FLAME.lit": { actions: "flameSeen" },
+    "FLAME.lost": { actions: "flameGone" },
     "TIMER.blowerOff": { actions: "blowerStops" },
   },
   states: {
@@ -101,9 +49,19 @@ export const directIgnitionMachine = directIgnition.createMachine({
     idle: {
       id: "idle",
       meta: meta("power", OFF),
+      // A flame that outlives the post-purge is found here.
+      always: { guard: "isFlameSensed", target: "falseFlame" },
+      on: { ...flameTooSoon, "CALL.on": { target: "called", actions: "callOn" } },
+    },
+    falseFlame: {
+      id: "falseFlame",
+      // The inducer airs the exchanger while the control waits for the flame signal to go.
+      meta: meta("power", PURGING),
       on: {
-        "CALL.on": { target: "called", actions: "callOn" },
-        "FLAME.lit": { target: "hardLockout" },
+        "FLAME.lost": [
+          { guard: "isCalling", target: "called", actions: "flameGone" },
+          { target: "idle", actions: "flameGone" },
+        ],
       },
     },
     called: {
@@ -111,6 +69,7 @@ export const directIgnitionMachine = directIgnition.createMachine({
       on: {
         ...endBeforeGas,
         ...cutByLimit,
+        ...flameTooSoon,
         "TIMER.debounce": [{ guard: "isLimitOpen", target: "limitOpen" }, { target: "checkingOpen" }],
       },
     },
@@ -132,31 +91,63 @@ export const directIgnitionMachine = directIgnition.createMachine({
       on: {
         ...endBeforeGas,
         ...cutByLimit,
-        "TIMER.startCheck": [{ guard: "isDraftClosed", target: "stuckClosed" }, { target: "inducer" }],
+        ...flameTooSoon,
+        "TIMER.startCheck": [
+          { guard: "isFlameSensed", target: "falseFlame" },
+          { guard: "isDraftClosed", target: "stuckClosed" },
+          { target: "starting" },
+        ],
       },
     },
     stuckClosed: {
       meta: meta("safeties", OFF),
-      on: { ...endBeforeGas, ...cutByLimit, "DRAFT.open": { target: "inducer", actions: "draftOpens" } },
+      on: {
+        ...endBeforeGas,
+        ...cutByLimit,
+        ...flameTooSoon,
+        "DRAFT.open": { target: "starting", actions: "draftOpens" },
+      },
+    },
+    starting: {
+      // The inducer has volts; whether it turns is known a moment later, or when the switch closes.
+      meta: meta("draft-rest", PURGING, "spinUp"),
+      on: {
+        ...endBeforeGas,
+        ...cutByLimit,
+        ...flameTooSoon,
+        "DRAFT.closed": { target: "prepurge", actions: "draftCloses" },
+        "TIMER.spinUp": { target: "inducer" },
+      },
     },
     inducer: {
       id: "inducer",
-      // Running is not proof: `draft-rest` is the last thing completed until the inducer is seen or read.
       meta: meta("inducer", PURGING, "draftWait"),
       on: {
         ...endBeforeGas,
         ...cutByLimit,
+        ...flameTooSoon,
         "DRAFT.closed": { target: "prepurge", actions: "draftCloses" },
         "TIMER.draftWait": { target: "draftPause" },
       },
     },
     draftPause: {
       meta: meta("inducer", OFF, "draftPause"),
-      on: { ...endBeforeGas, ...cutByLimit, "TIMER.draftPause": { target: "checkingOpen" } },
+      on: {
+        ...endBeforeGas,
+        ...cutByLimit,
+        ...flameTooSoon,
+        "TIMER.draftPause": { target: "checkingOpen" },
+      },
     },
     prepurge: {
       meta: meta("draft-proved", PURGING, "prepurge"),
-      on: { ...endBeforeGas, ...cutByLimit, ...draftLost, "TIMER.prepurge": { target: "warmUp" } },
+      on: {
+        ...endBeforeGas,
+        ...cutByLimit,
+        ...draftLost,
+        ...flameTooSoon,
+        "TIMER.prepurge": [{ guard: "isFlameSensed", target: "falseFlame" }, { target: "warmUp" }],
+      },
     },
     warmUp: {
       meta: meta("prepurge", GLOWING, "warmUp"),
@@ -164,8 +155,8 @@ export const directIgnitionMachine = directIgnition.createMachine({
         ...endBeforeGas,
         ...cutByLimit,
         ...draftLost,
+        ...flameTooSoon,
         "TIMER.warmUp": { target: "trial" },
-        "FLAME.lit": { target: "hardLockout" },
       },
     },
     trial: {
@@ -182,10 +173,13 @@ export const directIgnitionMachine = directIgnition.createMachine({
         ],
       },
       states: {
-        gas: { meta: meta("gas", TRYING), on: { "FLAME.lit": { target: "lightoff" } } },
+        gas: { meta: meta("gas", TRYING), on: { "FLAME.lit": { target: "lightoff", actions: "flameSeen" } } },
         lightoff: {
           meta: meta("lightoff", TRYING),
-          on: { "FLAME.proved": { target: "#burning" }, "FLAME.lost": { target: "gas" } },
+          on: {
+            "FLAME.proved": { target: "#burning" },
+            "FLAME.lost": { target: "gas", actions: "flameGone" },
+          },
         },
       },
     },
@@ -194,8 +188,9 @@ export const directIgnitionMachine = directIgnition.createMachine({
       on: {
         ...cutByLimit,
         ...draftLost,
+        ...flameTooSoon,
         "CALL.off": { target: "postPurge", actions: "callOff" },
-        "TIMER.interpurge": { target: "warmUp" },
+        "TIMER.interpurge": [{ guard: "isFlameSensed", target: "falseFlame" }, { target: "warmUp" }],
       },
     },
     burning: {
@@ -207,9 +202,9 @@ export const directIgnitionMachine = directIgnition.createMachine({
         ...draftLost,
         "CALL.off": { target: "postPurge", actions: "callOff" },
         "FLAME.lost": [
-          { guard: "hasRecyclesLeft", target: "interpurge", actions: "countRecycle" },
-          { guard: "locksHard", target: "hardLockout" },
-          { target: "softLockout" },
+          { guard: "hasRecyclesLeft", target: "interpurge", actions: ["countRecycle", "flameGone"] },
+          { guard: "locksHard", target: "hardLockout", actions: "flameGone" },
+          { target: "softLockout", actions: "flameGone" },
         ],
       },
       states: {
@@ -236,19 +231,24 @@ export const directIgnitionMachine = directIgnition.createMachine({
           initial: "low",
           states: {
             low: {
+              meta: { outputs: {}, timer: "stageTwo" },
               on: {
                 "TIMER.stageTwo": { guard: "isTwoStage", target: "raising" },
+                // A thermostat that asked for high from the start gets it once all burners are lit.
+                "TIMER.crossover": { guard: "wantsHighFire", target: "raising" },
                 "CALL.high": { guard: "isTwoStage", target: "raising", actions: "highCallOn" },
               },
             },
             // The inducer is on high and the gas still on low until the high draft switch closes.
             raising: {
+              meta: { outputs: { inducer: "high" } },
               on: {
                 "HIGH_DRAFT.closed": { target: "high" },
                 "CALL.low": { target: "low", actions: "highCallOff" },
               },
             },
             high: {
+              meta: { outputs: { inducer: "high", gas: "high" } },
               on: {
                 "HIGH_DRAFT.open": { target: "raising" },
                 "CALL.low": { target: "low", actions: "highCallOff" },
@@ -265,14 +265,15 @@ export const directIgnitionMachine = directIgnition.createMachine({
       },
     },
     softLockout: {
-      meta: meta("draft-proved", OFF, "softLockout"),
+      // The call and the safeties are all a locked-out control has; how high it had climbed is not kept.
+      meta: meta("safeties", OFF, "softLockout"),
       on: {
         "CALL.off": { target: "idle", actions: "callOff" },
         "TIMER.softLockout": { target: "called", actions: "startOver" },
       },
     },
     hardLockout: {
-      meta: meta("power", OFF),
+      meta: meta("call", OFF),
       on: { "CALL.off": { target: "idle", actions: "callOff" } },
     },
   },
@@ -291,6 +292,7 @@ export function sequenceInput(profile: UnitProfile): SequenceContext {
     highCall: false,
     limitOpen: false,
     draftClosed: false,
+    flame: false,
     blower: "off",
   };
 }

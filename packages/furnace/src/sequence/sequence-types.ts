@@ -13,6 +13,7 @@ export type SequenceEvent =
 export const SEQUENCE_TIMERS = [
   "debounce",
   "startCheck",
+  "spinUp",
   "draftWait",
   "draftPause",
   "prepurge",
@@ -43,6 +44,8 @@ export interface SequenceContext {
   highCall: boolean;
   limitOpen: boolean;
   draftClosed: boolean;
+  /** The control senses a flame, whether or not there should be one. */
+  flame: boolean;
   /** The circulating blower runs on for a while after the heat. */
   blower: "off" | "on" | "running-on";
 }
@@ -54,10 +57,13 @@ export interface SequenceOutputs {
   gas: "off" | "low" | "high";
 }
 
-/** What a state says of itself: the stage completed on entering it, and what it energises. */
+/**
+ * What a state says of itself: the stage completed on entering it, and what it energises. Where several states
+ * hold at once, as in the run, the highest stage and the highest rate count.
+ */
 export interface SequenceMeta {
-  completed: LastStage;
-  outputs: SequenceOutputs;
+  completed?: LastStage;
+  outputs: Partial<SequenceOutputs>;
   /** The timer that runs in this state, if one does. */
   timer?: SequenceTimer;
 }
