@@ -3,6 +3,7 @@ import { people, sessions } from "@emberladder/db";
 import type { Database } from "@emberladder/db";
 import { DrizzleMySQLAdapter } from "@lucia-auth/adapter-drizzle";
 import type { Adapter, DatabaseSession, DatabaseUser } from "lucia";
+import { findSessionAndPerson } from "./repository.ts";
 
 /** The key under which a session's secret is kept: a copy of the table opens no session. */
 export function hashSessionToken(token: string): string {
@@ -15,23 +16,35 @@ export function hashSessionToken(token: string): string {
  */
 export class HashedSessionAdapter implements Adapter {
   readonly #inner: Adapter;
+  readonly #database: Database;
 
   constructor(database: Database) {
+    this.#database = database;
     this.#inner = new DrizzleMySQLAdapter(database, sessions, people);
   }
 
   async getSessionAndUser(token: string): Promise<[DatabaseSession | null, DatabaseUser | null]> {
-    const [session, user] = await this.#inner.getSessionAndUser(hashSessionToken(token));
-    return [session && { ...session, id: token }, user];
+    const row = await findSessionAndPerson(this.#database, hashSessionToken(token));
+    if (!row) return [null, null];
+    const { personId, expiresAt, deviceId, createdAt, lastUsedAt, twoStepPassed, ...person } = row;
+    return [
+      {
+        id: token,
+        userId: personId,
+        expiresAt,
+        attributes: { deviceId, createdAt, lastUsedAt, twoStepPassed },
+      },
+      { id: personId, attributes: person },
+    ];
   }
 
   async setSession(session: DatabaseSession): Promise<void> {
-    const { endsAt, ...attributes } = session.attributes;
+    const { endsAt = session.expiresAt, ...attributes } = session.attributes;
     await this.#inner.setSession({
       ...session,
       id: hashSessionToken(session.id),
       expiresAt: endsAt,
-      attributes: attributes as DatabaseSession["attributes"],
+      attributes,
     });
   }
 

@@ -59,6 +59,29 @@ export async function findCompany(db: Queryable, companyId: string) {
   return row;
 }
 
+/** A session with its person by the session's hash: only the columns that every request needs. */
+export async function findSessionAndPerson(db: Queryable, sessionHash: string) {
+  const [row] = await db
+    .select({
+      personId: sessions.userId,
+      expiresAt: sessions.expiresAt,
+      deviceId: sessions.deviceId,
+      createdAt: sessions.createdAt,
+      lastUsedAt: sessions.lastUsedAt,
+      twoStepPassed: sessions.twoStepPassed,
+      companyId: people.companyId,
+      name: people.name,
+      email: people.email,
+      role: people.role,
+      disabledAt: people.disabledAt,
+      totpConfirmedAt: people.totpConfirmedAt,
+    })
+    .from(sessions)
+    .innerJoin(people, eq(people.id, sessions.userId))
+    .where(eq(sessions.id, sessionHash));
+  return row;
+}
+
 export async function deleteSession(db: Queryable, sessionHash: string): Promise<void> {
   await db.delete(sessions).where(eq(sessions.id, sessionHash));
 }

@@ -11,13 +11,14 @@ import { judgeSession, sessionLimitsOf } from "./session-limits.ts";
 export const SESSION_COOKIE = "__Host-emberladder";
 
 interface SessionAttributes {
-  publicId: string;
+  /** Only while a session is made: the id by which its person names it. */
+  publicId?: string;
   deviceId: string | null;
   createdAt: Date;
   lastUsedAt: Date;
   twoStepPassed: boolean;
   /** Only while a session is made: its absolute end. */
-  endsAt: Date;
+  endsAt?: Date;
 }
 
 interface PersonAttributes {

@@ -3,6 +3,7 @@ import type { Queryable } from "@emberladder/db";
 import { evolveState, initialState } from "./judge.ts";
 import type { DiagnosisState } from "./judge.ts";
 import { listEventsOf, readStoredEvent } from "./repository.ts";
+import type { DiagnosisRow } from "./repository.ts";
 
 /** What is known of a diagnosis at its head: its folded state, and each device's last event. */
 export interface RecordHead {
@@ -12,44 +13,49 @@ export interface RecordHead {
   lastOfDevice: ReadonlyMap<string, { hash: string; deviceSeq: number }>;
 }
 
-/** A diagnosis before its first event. */
-export const emptyHead: RecordHead = {
+const emptyHead: RecordHead = {
   serverSeq: 0,
   chainHash: GENESIS_HASH,
   state: initialState,
   lastOfDevice: new Map(),
 };
 
-/** Heads kept in the process. Only ever used when it is the very head that the database has locked. */
-const MOST_HEADS = 300;
-const kept = new Map<string, RecordHead>();
+/** A head with the row it belongs to, as this process committed them last. */
+export interface KeptHead {
+  row: DiagnosisRow;
+  head: RecordHead;
+}
 
 /**
- * The record of a diagnosis at a head. From memory where this process wrote that head itself, so that a
- * single event costs no re-reading; else folded again from the stored events.
+ * Heads kept in the process. One is only ever used where the database confirms, under its lock, that it is
+ * still the head: another process may have gone on from it.
  */
-export async function readHead(
-  db: Queryable,
-  diagnosisId: string,
-  at: { serverSeq: number; chainHash: string },
-): Promise<RecordHead> {
-  if (at.serverSeq === 0) return emptyHead;
-  const known = kept.get(diagnosisId);
-  if (known && known.serverSeq === at.serverSeq && known.chainHash === at.chainHash) return known;
-  const rows = await listEventsOf(db, diagnosisId);
-  let state = initialState;
-  const lastOfDevice = new Map<string, { hash: string; deviceSeq: number }>();
-  for (const row of rows) {
-    state = evolveState(state, readStoredEvent(row), row);
-    lastOfDevice.set(row.deviceId, row);
-  }
-  return { ...at, state, lastOfDevice };
+const MOST_HEADS = 300;
+const kept = new Map<string, KeptHead>();
+
+/** The head as this process knows it; it may be old. */
+export function findKeptHead(diagnosisId: string): KeptHead | undefined {
+  return kept.get(diagnosisId);
 }
 
 /** Keeps a head that was committed. */
-export function keepHead(diagnosisId: string, head: RecordHead): void {
+export function keepHead(diagnosisId: string, entry: KeptHead): void {
   kept.delete(diagnosisId);
-  kept.set(diagnosisId, head);
+  kept.set(diagnosisId, entry);
   const oldest = kept.size > MOST_HEADS ? kept.keys().next().value : undefined;
   if (oldest !== undefined) kept.delete(oldest);
+}
+
+/** The record of a diagnosis at the head of its locked row: from memory where that is it, else folded again. */
+export async function readHead(db: Queryable, row: DiagnosisRow): Promise<RecordHead> {
+  if (row.serverSeq === 0) return emptyHead;
+  const known = kept.get(row.id)?.head;
+  if (known && known.serverSeq === row.serverSeq && known.chainHash === row.chainHash) return known;
+  let state = initialState;
+  const lastOfDevice = new Map<string, { hash: string; deviceSeq: number }>();
+  for (const event of await listEventsOf(db, row.id)) {
+    state = evolveState(state, readStoredEvent(event), event);
+    lastOfDevice.set(event.deviceId, { hash: event.hash, deviceSeq: event.deviceSeq });
+  }
+  return { serverSeq: row.serverSeq, chainHash: row.chainHash, state, lastOfDevice };
 }

@@ -37,15 +37,32 @@ export async function insertDiagnosis(db: Queryable, row: typeof diagnoses.$infe
   await db.insert(diagnoses).values(row);
 }
 
-export async function updateDiagnosis(
+/**
+ * Moves the head of a diagnosis on, if it is still where the caller believes; false when somebody else moved
+ * it. The row stays locked until the transaction ends.
+ */
+export async function moveHead(
   db: Queryable,
+  from: { serverSeq: number; chainHash: string },
   diagnosisId: string,
   change: Partial<typeof diagnoses.$inferInsert>,
-): Promise<void> {
-  await db.update(diagnoses).set(change).where(eq(diagnoses.id, diagnosisId));
+): Promise<boolean> {
+  const [result] = await db
+    .update(diagnoses)
+    .set(change)
+    .where(
+      and(
+        eq(diagnoses.id, diagnosisId),
+        eq(diagnoses.serverSeq, from.serverSeq),
+        eq(diagnoses.chainHash, from.chainHash),
+      ),
+    );
+  return result.affectedRows === 1;
 }
 
-export async function insertEvents(db: Queryable, rows: (typeof events.$inferInsert)[]): Promise<void> {
+export type NewEventRow = typeof events.$inferInsert;
+
+export async function insertEvents(db: Queryable, rows: NewEventRow[]): Promise<void> {
   await db.insert(events).values(rows);
 }
 
@@ -61,11 +78,16 @@ export async function listFlagRules(db: Queryable, diagnosisId: string): Promise
   return rows.map(({ rule }) => rule);
 }
 
+export type KnownEvent = Pick<
+  EventRow,
+  "id" | "hash" | "diagnosisId" | "serverSeq" | "deviceId" | "deviceSeq"
+>;
+
 /** Events that have one of some ids, or one of some devices' numbers. */
 export async function findKnownEvents(
   db: Queryable,
   wanted: readonly { id: string; deviceId: string; deviceSeq: number }[],
-) {
+): Promise<KnownEvent[]> {
   const columns = {
     id: events.id,
     hash: events.hash,
