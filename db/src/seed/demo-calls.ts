@@ -72,7 +72,6 @@ const upflow = boardUnit({
     blowerFlaA: 7.6,
   },
   timings: { ...TIMINGS, warmUpS: 20 },
-  lastFlueCo: { date: "2025-10-02", airFreePpm: 29 },
 });
 
 export const demoCalls: readonly DemoCall[] = [

@@ -1,6 +1,7 @@
 import { Argon2id } from "oslo/password";
 import { base32 } from "oslo/encoding";
 import { createTOTPKeyURI } from "oslo/otp";
+import type { UnitProfile } from "@emberladder/furnace";
 import { eq } from "drizzle-orm";
 import type { Database, Transaction } from "../client.ts";
 import { sealSecret } from "../sealed-secret.ts";
@@ -148,7 +149,13 @@ async function seedCall(
     .values({ id: ids.site, customerId: ids.customer, ...owner, ...call.site, altitudeFt: 4300 });
   await tx
     .insert(units)
-    .values({ id: ids.unit, siteId: ids.site, ...owner, name: call.unitName, profile: call.profile });
+    .values({
+      id: ids.unit,
+      siteId: ids.site,
+      ...owner,
+      name: call.unitName,
+      profile: withFreshFlueCo(call.profile, now),
+    });
   await tx.insert(calls).values({
     id: ids.call,
     ...owner,
@@ -159,6 +166,12 @@ async function seedCall(
     complaint: call.complaint,
     scheduledFor: todayAt(now, call.hour),
   });
+}
+
+/** A flue CO from two months ago: the units were serviced in the autumn, so a repair need not take it again. */
+function withFreshFlueCo(profile: UnitProfile, now: Date): UnitProfile {
+  const date = new Date(now.getTime() - 60 * 86_400_000).toISOString().slice(0, 10);
+  return { ...profile, lastFlueCo: { date, airFreePpm: 29 } };
 }
 
 function personIdOf(company: string, start: string): string {

@@ -1,5 +1,5 @@
 import { z } from "zod";
-import { OUTCOMES, READING_STAGES, READING_UNITS } from "@emberladder/furnace";
+import { OUTCOMES, PUT_BACK_KINDS, READING_STAGES, READING_UNITS } from "@emberladder/furnace";
 
 /**
  * Decision-tree document, version 1: the company's procedure for one kind of unit. The shape is frozen;
@@ -68,6 +68,11 @@ export const nodeSchema = z.discriminatedUnion("kind", [
         gas: z.enum(["open", "shut"]).optional(),
         calling: z.boolean().optional(),
       })
+      .optional(),
+    /** What the act takes off or out: each becomes an entry of the put-back list. */
+    opens: z
+      .array(z.strictObject({ kind: z.enum(PUT_BACK_KINDS), what: z.string().regex(/^[a-z0-9-]+$/) }))
+      .max(4)
       .optional(),
     to: nodeId,
   }),

@@ -56,7 +56,8 @@ export function ladderOf(state: DiagnosisState): Rung[] {
   const last = lastStageOf(state);
   const reached = last === "any" || last === "none" ? -1 : stages.indexOf(last);
   const running = watch !== undefined && !watch.ended;
-  const cycled = state.proofs["close-cycles"] !== undefined;
+  const cycled =
+    (state.proofs["close-cycles"]?.value ?? 0) > 0 && state.proofs["close-cycle-end"] !== undefined;
   return stages.map((stage, index) => {
     const seen = seenAt(watch, stage);
     const reading = newestReading(state, stage);

@@ -13,7 +13,11 @@ const parts: TreeNode[] = [...powerNodes, ...draftNodes, ...ignitionNodes, ...bu
 function conclusionsOf(nodes: readonly TreeNode[]): TreeNode[] {
   const targets = nodes.flatMap((node) => {
     if (node.kind === "check" || node.kind === "look") {
-      return [...node.branches.map((branch) => branch.to), node.otherwise, ...(node.cannot ? [node.cannot] : [])];
+      return [
+        ...node.branches.map((branch) => branch.to),
+        node.otherwise,
+        ...(node.cannot ? [node.cannot] : []),
+      ];
     }
     return node.kind === "do" || node.kind === "go-to" ? [node.to] : [];
   });
@@ -56,7 +60,15 @@ export const hotSurfaceInducedTree: TreeDocument = {
     ...parts,
     ...conclusionsOf(parts),
     handOver("ask-senior", "senior", "The procedure ends here. Say how high it climbed and what was read."),
-    handOver("ask-utility", "utility", "Gas does not reach the building. Leave the unit off; the utility has to come."),
-    handOver("ask-supplier", "supplier", "The propane supply fails. Leave the unit off; the supplier has to come."),
+    handOver(
+      "ask-utility",
+      "utility",
+      "Gas does not reach the building. Leave the unit off; the utility has to come.",
+    ),
+    handOver(
+      "ask-supplier",
+      "supplier",
+      "The propane supply fails. Leave the unit off; the supplier has to come.",
+    ),
   ],
 };

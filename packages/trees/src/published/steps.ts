@@ -3,10 +3,19 @@ import type { TreeBranch, TreeNode } from "../document.ts";
 
 /** Short forms for writing a tree by hand: an id of the catalogue that is wrong does not compile. */
 
-type Extra = { minutes?: number; safety?: string; note?: string; stage?: ReadingStage; way?: string; cannot?: string };
+type Extra = {
+  minutes?: number;
+  safety?: string;
+  note?: string;
+  stage?: ReadingStage;
+  way?: string;
+  cannot?: string;
+};
 
 /** Branches of one check: by finding, then by class. Each names the node it goes to. */
-export type Answers<C extends CheckId> = { [F in FindingIdOf<C>]?: string } & { [O in Outcome as `is-${O}`]?: string };
+export type Answers<C extends CheckId> = { [F in FindingIdOf<C>]?: string } & {
+  [O in Outcome as `is-${O}`]?: string;
+};
 
 function branchesOf(answers: Record<string, string | undefined>): TreeBranch[] {
   return Object.entries(answers).flatMap(([key, to]): TreeBranch[] => {
@@ -19,24 +28,37 @@ function branchesOf(answers: Record<string, string | undefined>): TreeBranch[] {
 }
 
 /** A reading to take. */
-export function read<C extends CheckId>(id: string, check: C, answers: Answers<C>, otherwise: string, extra: Extra = {}): TreeNode {
+export function read<C extends CheckId>(
+  id: string,
+  check: C,
+  answers: Answers<C>,
+  otherwise: string,
+  extra: Extra = {},
+): TreeNode {
   return { kind: "check", id, check, branches: branchesOf(answers), otherwise, ...extra };
 }
 
 /** Something to look at. */
-export function look<C extends CheckId>(id: string, check: C, answers: Answers<C>, otherwise: string, extra: Extra = {}): TreeNode {
+export function look<C extends CheckId>(
+  id: string,
+  check: C,
+  answers: Answers<C>,
+  otherwise: string,
+  extra: Extra = {},
+): TreeNode {
   return { kind: "look", id, check, branches: branchesOf(answers), otherwise, ...extra };
 }
 
-/** Something to do, and what it changes on the unit. */
+type DoNode = Extract<TreeNode, { kind: "do" }>;
+
+/** Something to do, what it changes on the unit, and what it takes off or out. */
 export function act(
   id: string,
   words: string,
   to: string,
-  sets?: Extract<TreeNode, { kind: "do" }>["sets"],
-  extra: Pick<Extra, "note" | "safety" | "minutes"> = {},
+  extra: Pick<DoNode, "note" | "safety" | "minutes" | "sets" | "opens"> = {},
 ): TreeNode {
-  return { kind: "do", id, act: words, to, ...(sets ? { sets } : {}), ...extra };
+  return { kind: "do", id, act: words, to, ...extra };
 }
 
 /** A cause, under the id `is-<fault>`. */
@@ -45,6 +67,10 @@ export function conclude(fault: FaultId, note?: string): TreeNode {
 }
 
 /** Where the procedure ends without a cause. */
-export function handOver(id: string, whom: Extract<TreeNode, { kind: "hand-over" }>["whom"], say: string): TreeNode {
+export function handOver(
+  id: string,
+  whom: Extract<TreeNode, { kind: "hand-over" }>["whom"],
+  say: string,
+): TreeNode {
   return { kind: "hand-over", id, whom, say };
 }

@@ -22,7 +22,7 @@ export function PlainButton({ children, compact, ...native }: Native & { compact
     <button
       type="button"
       {...native}
-      className={`${compact ? "min-h-12 px-3" : "min-h-14 w-full px-4"} rounded border-2 border-rule bg-ground py-2 text-field font-medium text-ink disabled:text-quiet`}
+      className={`${compact ? "min-h-12 px-2" : "min-h-14 w-full px-4"} rounded border-2 border-rule bg-ground py-2 text-field font-medium text-ink disabled:text-quiet`}
     >
       {children}
     </button>
@@ -35,7 +35,7 @@ export function LinkButton({ children, ...native }: Native) {
     <button
       type="button"
       {...native}
-      className="min-h-12 px-1 text-field font-semibold text-link underline underline-offset-4"
+      className="min-h-12 text-left text-field font-semibold text-link underline underline-offset-4"
     >
       {children}
     </button>

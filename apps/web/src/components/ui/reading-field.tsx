@@ -31,7 +31,7 @@ export function ReadingField({
   const id = useId();
   return (
     <div className="min-w-0 grow">
-      <label htmlFor={id} className="mb-1 block text-field font-semibold">
+      <label htmlFor={id} className="mb-1 block text-field font-semibold first-letter:uppercase">
         {label}
       </label>
       <div className="flex h-15 items-center gap-2 rounded border-3 border-ink bg-surface px-3">
@@ -39,6 +39,7 @@ export function ReadingField({
           id={id}
           ref={inputRef}
           type="text"
+          placeholder=" "
           inputMode={allowNegative ? "text" : "decimal"}
           autoComplete="off"
           autoCorrect="off"

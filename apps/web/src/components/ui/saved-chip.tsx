@@ -35,7 +35,7 @@ export function SavedChip() {
           <path d="M6 15l4 4 6-8" />
         )}
       </svg>
-      <span role="status" className="max-w-17">
+      <span role="status" className="max-w-[5.5rem]">
         {words}
       </span>
     </Link>

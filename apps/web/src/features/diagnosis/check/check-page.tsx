@@ -79,7 +79,9 @@ export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | 
       </h1>
       <RefusalNote />
       <UnitStateBar check={check} node={node} />
-      <p className="text-field">{t(`trade:checks.${check}.do`)}</p>
+      <p className="text-field short:group-has-[input:not(:placeholder-shown)]:hidden">
+        {t(`trade:checks.${check}.do`)}
+      </p>
       {content}
       {showing === "why" && (
         <aside className="border-l-6 border-rule bg-surface p-3 text-field">

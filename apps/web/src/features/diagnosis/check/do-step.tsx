@@ -1,4 +1,4 @@
-import { command } from "@emberladder/diagnosis";
+import { command, openPutBacks } from "@emberladder/diagnosis";
 import type { Command } from "@emberladder/diagnosis";
 import type { TreeNode } from "@emberladder/trees";
 import { useTranslation } from "react-i18next";
@@ -17,6 +17,11 @@ export function DoStep({ node }: { node: Extract<TreeNode, { kind: "do" }> }) {
   const climb = useClimbLine();
   const done: Command[] = [
     ...(node.sets ? [command("unit-state.set", node.sets)] : []),
+    ...(node.opens ?? [])
+      .filter(
+        ({ kind, what }) => !openPutBacks(state).some((item) => item.kind === kind && item.what === what),
+      )
+      .map((opening) => command("put-back.opened", opening)),
     command("tree.step-done", { treeNode: node.id }),
   ];
   return (

@@ -38,7 +38,10 @@ export function StartCheck({
             : change.calling === false && change.power !== "off"
               ? t("check.start.endCall")
               : "",
-          ...opens.map((opening) => t(`trade:putBack.out.${opening.what}`)),
+          ...opens.map(
+            (opening) =>
+              `${t(`trade:putBack.what.${opening.what}`)} ${t(`trade:putBack.state.${opening.kind}`)}.`,
+          ),
         ].filter(Boolean);
         return (
           <AnswerButton

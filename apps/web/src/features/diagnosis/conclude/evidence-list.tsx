@@ -26,7 +26,8 @@ export function EvidenceList({ evidence }: { evidence: readonly string[] }) {
         <li key={line.id} className="flex gap-3 py-2 text-field">
           <span className="pt-0.5">{line.outcome && <OutcomeMark outcome={line.outcome} />}</span>
           <span>
-            <span className="font-semibold">{line.what}</span> <span className="numeric">{line.value}</span>
+            <span className="font-semibold">{line.what}</span> <span className="numeric">{line.figures}</span>{" "}
+            {line.found}
             <span className="block text-quiet">{line.state}</span>
           </span>
         </li>

@@ -62,7 +62,9 @@ export function FieldLayout({
           tabIndex={-1}
           aria-label={t("field.step")}
         >
-          <div className="mx-auto flex w-full max-w-[560px] grow flex-col gap-3 p-4">{children}</div>
+          <div className="mx-auto group flex w-full max-w-[560px] grow flex-col gap-3 p-4 short:gap-2 short:py-3">
+            {children}
+          </div>
         </main>
       </div>
       {pinned && (

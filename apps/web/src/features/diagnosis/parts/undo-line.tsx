@@ -12,9 +12,11 @@ export function UndoLine() {
   return (
     <p className="flex items-center justify-between gap-3 border-t-1 border-hair pt-1 text-field text-quiet">
       <span className="min-w-0 truncate">{t("undo.recorded", { what: t(`undo.what.${last.type}`) })}</span>
-      <LinkButton onClick={() => void recordAndGoOn([command("event.undone", { of: last.id })])}>
-        {t("undo.takeBack")}
-      </LinkButton>
+      <span className="shrink-0 whitespace-nowrap">
+        <LinkButton onClick={() => void recordAndGoOn([command("event.undone", { of: last.id })])}>
+          {t("undo.takeBack")}
+        </LinkButton>
+      </span>
     </p>
   );
 }

@@ -6,6 +6,11 @@ import { formatNumber } from "#lib/format-number.ts";
 /** What an answer says, in words: what was taken, its value or finding, the unit's state and the time. */
 export interface AnswerWords {
   what: string;
+  /** Figures, drawn in the figures' type; empty where there are none. */
+  figures: string;
+  /** What was found, in words. */
+  found: string;
+  /** Both together. */
   value: string;
   state: string;
 }
@@ -26,23 +31,30 @@ export function useAnswerWords() {
           ? `${one.value === "OL" ? "OL" : formatNumber(one.value)} ${one.unit ? t(`trade:units.${one.unit}`) : ""}`
           : "";
     const finding = one.finding ? findingWord(one.check, one.finding) : "";
+    const plain = one.outcome ? t(`check.zones.${one.outcome}`) : "";
     return {
       what: t(`trade:checks.${one.check}.title`),
-      value:
-        [reading, finding].filter(Boolean).join(", ") || (one.outcome ? t(`check.zones.${one.outcome}`) : ""),
+      figures: reading,
+      found: finding || (reading ? "" : plain),
+      value: [reading, finding].filter(Boolean).join(", ") || plain,
       state: t("conclude.readState", {
         state: t(`unitState.short.${one.power}`),
         time: format(one.at, "HH:mm"),
       }),
     };
   };
-  const ofLook = (look: Look): AnswerWords => ({
-    what: t(`trade:firstLook.${look.item}.title`),
-    value:
+  const ofLook = (look: Look): AnswerWords => {
+    const found =
       look.check && look.finding
         ? findingWord(look.check, look.finding)
-        : t(look.answer === "right" ? "check.zones.good" : "check.zones.fail"),
-    state: t("conclude.lookState", { time: format(look.at, "HH:mm") }),
-  });
+        : t(look.answer === "right" ? "check.zones.good" : "check.zones.fail");
+    return {
+      what: t(`trade:firstLook.${look.item}.title`),
+      figures: "",
+      found,
+      value: found,
+      state: t("conclude.lookState", { time: format(look.at, "HH:mm") }),
+    };
+  };
   return { ofObservation, ofLook };
 }

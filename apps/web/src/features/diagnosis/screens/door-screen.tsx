@@ -79,7 +79,7 @@ export function DoorScreen() {
         >
           {t("door.peopleWell")}
         </AnswerButton>
-        <div className="grid grid-cols-[3fr_2fr_2fr] gap-2">
+        <div className="grid grid-cols-[4fr_3fr_3fr] gap-2">
           <PlainButton compact onClick={() => setTyping("co")}>
             {people?.coPpm ? t("door.coStored", { ppm: people.coPpm }) : t("door.coMore")}
           </PlainButton>
@@ -104,21 +104,23 @@ export function DoorScreen() {
             {smell?.lelPct ? t("door.lelStored", { pct: smell.lelPct }) : t("door.lelMore")}
           </PlainButton>
           <PlainButton compact onClick={() => answer({ question: "smell", smell: true })}>
-            {t("door.yes")}
+            {t("door.smellYes")}
           </PlainButton>
         </div>
       </Question>
       <Question number={3} text={t(onRoof ? "door.wayInRoof" : "door.wayIn")} last>
-        <AnswerButton
-          chosen={wayIn?.safe === true}
-          aside={time(wayIn?.at)}
-          onChoose={() => answer({ question: "way-in", safe: true })}
-        >
-          {t("door.yes")}
-        </AnswerButton>
-        <PlainButton compact onClick={() => answer({ question: "way-in", safe: false })}>
-          {t("door.no")}
-        </PlainButton>
+        <div className="grid grid-cols-[1fr_6rem] gap-2">
+          <AnswerButton
+            chosen={wayIn?.safe === true}
+            aside={time(wayIn?.at)}
+            onChoose={() => answer({ question: "way-in", safe: true })}
+          >
+            {t("door.yes")}
+          </AnswerButton>
+          <PlainButton compact onClick={() => answer({ question: "way-in", safe: false })}>
+            {t("door.no")}
+          </PlainButton>
+        </div>
       </Question>
       <p className="text-field text-quiet short:hidden">{t("door.note")}</p>
     </FieldLayout>
@@ -139,7 +141,7 @@ function Question({
   return (
     <section
       aria-label={text}
-      className={`flex flex-col gap-2 ${last ? "" : "border-b-1 border-hair pb-3 short:pb-2"}`}
+      className={`flex flex-col gap-2 short:gap-1.5 ${last ? "" : "border-b-1 border-hair pb-3 short:pb-1.5"}`}
     >
       <h2 className="flex gap-3 text-field font-semibold">
         <span className="numeric">{number}</span>

@@ -16,12 +16,14 @@ import { useUnitLine } from "../parts/use-unit-line.ts";
 export function PutBackScreen() {
   const { t } = useTranslation();
   const navigate = useNavigate();
-  const { diagnosisId, state, record } = useDiagnosis();
+  const { diagnosisId, state, record, recordAndGoOn } = useDiagnosis();
   const unitLine = useUnitLine();
   const out = openPutBacks(state);
   const back = state.putBacks.filter((item) => item.restored);
+  // The last thing that has to be back before the light-off goes on by itself.
+  const isLast = out.filter((item) => item.kind !== "cover-removed").length === 1;
   const restore = (item: PutBack) =>
-    void record([
+    void (isLast && item.kind !== "cover-removed" && state.repairs.length > 0 ? recordAndGoOn : record)([
       ...(item.kind === "valve-closed" ? [command("unit-state.set", { gas: "open" })] : []),
       command("put-back.restored", {
         of: item.eventId,

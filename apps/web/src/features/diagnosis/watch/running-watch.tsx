@@ -48,7 +48,17 @@ export function RunningWatch({ watch }: { watch: Watch }) {
       title={t("watch.header")}
       subtitle={unitLine}
       strip={false}
-      flush={<HazardLine flush>{t("watch.hazard")}</HazardLine>}
+      flush={
+        <>
+          <HazardLine flush>{t("watch.hazard")}</HazardLine>
+          <div className="flex items-center gap-4 border-b-2 border-hair bg-surface px-4 py-2 short:py-1">
+            <span className="numeric text-timer font-semibold" role="timer">
+              {formatClock(elapsed)}
+            </span>
+            <h1 className="text-[1.25rem] leading-6.5">{t("watch.tap")}</h1>
+          </div>
+        </>
+      }
       pinned={
         <EndActs
           elapsed={elapsed}
@@ -61,12 +71,6 @@ export function RunningWatch({ watch }: { watch: Watch }) {
         />
       }
     >
-      <div className="-mx-4 -mt-4 flex items-center gap-4 border-b-2 border-hair bg-surface px-4 py-2">
-        <span className="numeric text-timer font-semibold" role="timer">
-          {formatClock(elapsed)}
-        </span>
-        <h1 className="text-[1.25rem] leading-6.5">{t("watch.tap")}</h1>
-      </div>
       <RefusalNote />
       <ol className="flex flex-col-reverse border-x-3 border-ink" aria-label={t("watch.list")}>
         {sights.map((sight, index) => {

@@ -1,5 +1,6 @@
 import type { Rung } from "@emberladder/diagnosis";
 import type { Sight, Span } from "@emberladder/furnace";
+import { useEffect, useRef } from "react";
 import { useTranslation } from "react-i18next";
 import { formatClock } from "#lib/use-now.ts";
 
@@ -36,13 +37,18 @@ export function SightRow({
       : isNext && due
         ? dueWord(t, due, elapsed)
         : "";
+  const row = useRef<HTMLLIElement>(null);
+  // The next thing to be seen stays in sight on a small phone; nothing moves under a thumb that is not there.
+  useEffect(() => {
+    if (isNext) row.current?.scrollIntoView({ block: "center" });
+  }, [isNext]);
   return (
-    <li className="flex flex-col">
+    <li ref={row} className="flex flex-col">
       <button
         type="button"
         onClick={onSee}
         disabled={seen}
-        className="flex min-h-14 items-center gap-3 px-3 text-left text-[1.25rem] font-semibold text-ink"
+        className="flex min-h-14 items-center gap-3 px-3 short:min-h-12 text-left text-[1.25rem] font-semibold text-ink"
       >
         <svg
           viewBox="0 0 34 22"
