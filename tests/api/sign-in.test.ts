@@ -108,16 +108,16 @@ describe("signing in", () => {
       await createClient(server).call("signIn", { body: { email, password: "some long pass phrase" } });
       return performance.now() - from;
     };
-    const known: number[] = [];
-    const unknown: number[] = [];
-    for (let i = 0; i < 7; i += 1) {
+    let [known, unknown] = [Infinity, Infinity];
+    // The least of several, taken in turn: other work on the machine only ever adds to a time.
+    for (let i = 0; i < 10; i += 1) {
       const { people } = await makeCompany(server);
-      known.push(await time(people.technician.email));
-      unknown.push(await time(`stranger-${i}@company.example`));
+      known = Math.min(known, await time(people.technician.email));
+      unknown = Math.min(unknown, await time(`stranger-${i}@company.example`));
     }
-    const middle = (values: number[]) => values.toSorted((a, b) => a - b)[3] ?? 0;
-    // A hash takes about 100 ms; without the one for nobody the difference would be that.
-    expect(Math.abs(middle(known) - middle(unknown))).toBeLessThan(40);
+    // Without a hash for nobody, the unknown one would take a few milliseconds against some fifty.
+    expect(unknown).toBeGreaterThan(known / 2);
+    expect(Math.abs(known - unknown)).toBeLessThan(20);
   });
 
   it("writes good and failed sign-ins to the audit log", async () => {

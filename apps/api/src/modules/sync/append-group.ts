@@ -154,7 +154,7 @@ async function write(
     before: head,
     after: judged.head,
     isNew,
-    mustWait: change.waitsForRelease,
+    mustWait: change.waitsForRelease === true,
   });
   return { verdict, keep: { row: { ...row, ...change }, head: judged.head } };
 }
