@@ -21,6 +21,7 @@ export * from "./checks/openings.ts";
 export * from "./closing/closing-ids.ts";
 export * from "./closing/touch-rows.ts";
 export * from "./faults/component-ids.ts";
+export * from "./faults/decides.ts";
 export * from "./faults/fault-ids.ts";
 export * from "./faults/fault-types.ts";
 export * from "./faults/faults.ts";

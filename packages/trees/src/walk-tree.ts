@@ -1,4 +1,5 @@
-import type { LastStage, Outcome, ReadingUnit } from "@emberladder/furnace";
+import { getCheck, isCheckId, mayApply } from "@emberladder/furnace";
+import type { LastStage, Options, Outcome, ReadingUnit, VariantCodes } from "@emberladder/furnace";
 import { isAsking } from "./document.ts";
 import type { AskingNode, TreeBranch, TreeDocument, TreeNode } from "./document.ts";
 
@@ -10,24 +11,45 @@ export interface TreeAnswer {
   unit?: ReadingUnit;
 }
 
+/** What a walk has to know of the unit, so that no question is asked that the unit cannot answer. */
+export interface TreeUnit {
+  codes: VariantCodes;
+  options: Options;
+}
+
 /** Finds a node by id; undefined where the document does not have it. */
 export function findNode(tree: TreeDocument, id: string): TreeNode | undefined {
   return tree.nodes.find((node) => node.id === id);
 }
 
+/** Whether a step asks for a check that the unit cannot have; an option it does not state may be there. */
+export function isBesideUnit(node: TreeNode, unit: TreeUnit | undefined): node is AskingNode {
+  if (!unit || !isAsking(node) || !isCheckId(node.check)) return false;
+  return !mayApply(getCheck(node.check).applies, unit.codes, unit.options);
+}
+
 /**
- * Follows go-to nodes to the node that is really meant. A chain of go-tos that comes back on itself ends in
- * undefined rather than in a loop; `lintTree` reports it.
+ * Follows go-to nodes to the node that is really meant. With a unit, a step whose check that unit cannot have is
+ * passed over: it is left as if it could not be done. A chain that comes back on itself ends in undefined rather
+ * than in a loop; `lintTree` reports it.
  */
-export function settleNode(tree: TreeDocument, id: string | undefined): TreeNode | undefined {
+export function settleNode(
+  tree: TreeDocument,
+  id: string | undefined,
+  unit?: TreeUnit,
+): TreeNode | undefined {
   const seen = new Set<string>();
   let current = id === undefined ? undefined : findNode(tree, id);
-  while (current?.kind === "go-to") {
+  while (current) {
+    let next: string;
+    if (current.kind === "go-to") next = current.to;
+    else if (isBesideUnit(current, unit)) next = current.cannot ?? current.otherwise;
+    else return current;
     if (seen.has(current.id)) return undefined;
     seen.add(current.id);
-    current = findNode(tree, current.to);
+    current = findNode(tree, next);
   }
-  return current;
+  return undefined;
 }
 
 /**
@@ -37,9 +59,10 @@ export function settleNode(tree: TreeDocument, id: string | undefined): TreeNode
 export function enterTree(
   tree: TreeDocument,
   at: { lastStage: LastStage; lookItem?: string },
+  unit?: TreeUnit,
 ): TreeNode | undefined {
   const key = at.lookItem && tree.entries[`look:${at.lookItem}`] ? `look:${at.lookItem}` : at.lastStage;
-  return settleNode(tree, tree.entries[key] ?? tree.entries["any"]);
+  return settleNode(tree, tree.entries[key] ?? tree.entries["any"], unit);
 }
 
 function takes(branch: TreeBranch, answer: TreeAnswer): boolean {
@@ -61,21 +84,26 @@ export function chooseBranch(node: AskingNode, answer: TreeAnswer): TreeBranch |
 }
 
 /** The node after an answered one. */
-export function afterAnswer(tree: TreeDocument, nodeId: string, answer: TreeAnswer): TreeNode | undefined {
+export function afterAnswer(
+  tree: TreeDocument,
+  nodeId: string,
+  answer: TreeAnswer,
+  unit?: TreeUnit,
+): TreeNode | undefined {
   const node = settleNode(tree, nodeId);
   if (!node || !isAsking(node)) return undefined;
-  return settleNode(tree, chooseBranch(node, answer)?.to ?? node.otherwise);
+  return settleNode(tree, chooseBranch(node, answer)?.to ?? node.otherwise, unit);
 }
 
 /** The node after one that could not be done here. */
-export function afterDeclined(tree: TreeDocument, nodeId: string): TreeNode | undefined {
+export function afterDeclined(tree: TreeDocument, nodeId: string, unit?: TreeUnit): TreeNode | undefined {
   const node = settleNode(tree, nodeId);
   if (!node || !isAsking(node)) return undefined;
-  return settleNode(tree, node.cannot ?? node.otherwise);
+  return settleNode(tree, node.cannot ?? node.otherwise, unit);
 }
 
 /** The node after a `do` node. */
-export function afterDone(tree: TreeDocument, nodeId: string): TreeNode | undefined {
+export function afterDone(tree: TreeDocument, nodeId: string, unit?: TreeUnit): TreeNode | undefined {
   const node = settleNode(tree, nodeId);
-  return node?.kind === "do" ? settleNode(tree, node.to) : undefined;
+  return node?.kind === "do" ? settleNode(tree, node.to, unit) : undefined;
 }

@@ -1,6 +1,13 @@
-import { FREQUENCIES, faultsFor, getFault, isCheckId, isFaultId, pointsAt } from "@emberladder/furnace";
+import {
+  FREQUENCIES,
+  decides,
+  faultsFor,
+  getFault,
+  isCheckId,
+  isFaultId,
+  pointsAt,
+} from "@emberladder/furnace";
 import type { FaultId } from "@emberladder/furnace";
-import { decides } from "../rules/conclude-rules.ts";
 import type { DiagnosisState, Observation } from "../state/diagnosis-state.ts";
 
 interface Seen {

@@ -17,19 +17,20 @@ export interface TreePosition {
  */
 export function treePosition(tree: TreeDocument, state: DiagnosisState): TreePosition {
   const step = state.treeSteps.at(-1);
+  const unit = state.profile ?? undefined;
   if (!step) return { node: enter(tree, state), leftAt: null };
   switch (step.kind) {
     case "answered": {
       const answer = state.observations.find((observation) => observation.eventId === step.eventId);
       const value = answer?.value === "OL" ? Infinity : answer?.value;
-      return { node: afterAnswer(tree, step.treeNode, { ...answer, value }) ?? null, leftAt: null };
+      return { node: afterAnswer(tree, step.treeNode, { ...answer, value }, unit) ?? null, leftAt: null };
     }
     case "declined":
-      return { node: afterDeclined(tree, step.treeNode) ?? null, leftAt: null };
+      return { node: afterDeclined(tree, step.treeNode, unit) ?? null, leftAt: null };
     case "done":
-      return { node: afterDone(tree, step.treeNode) ?? null, leftAt: null };
+      return { node: afterDone(tree, step.treeNode, unit) ?? null, leftAt: null };
     case "entered":
-      return { node: settleNode(tree, step.treeNode) ?? null, leftAt: null };
+      return { node: settleNode(tree, step.treeNode, unit) ?? null, leftAt: null };
     case "left":
       return { node: null, leftAt: findNode(tree, step.treeNode) ?? null };
   }
@@ -38,5 +39,8 @@ export function treePosition(tree: TreeDocument, state: DiagnosisState): TreePos
 /** The step a walk begins with: the part for a first-look hit that pointed at a rung, else the stopped rung. */
 function enter(tree: TreeDocument, state: DiagnosisState): TreeNode | null {
   const hit = state.looks.findLast((look) => look.answer === "hit");
-  return enterTree(tree, { lastStage: lastStageOf(state), lookItem: hit?.item }) ?? null;
+  return (
+    enterTree(tree, { lastStage: lastStageOf(state), lookItem: hit?.item }, state.profile ?? undefined) ??
+    null
+  );
 }

@@ -1,5 +1,5 @@
-import { causesOf, getFault, isFaultId, isSymptomId, mayApply } from "@emberladder/furnace";
-import type { FaultId } from "@emberladder/furnace";
+import { causesOf, decides, getFault, isFaultId, isSymptomId, mayApply } from "@emberladder/furnace";
+import type { Evidence } from "@emberladder/furnace";
 import type { BodyOf } from "../events/index.ts";
 import type { DiagnosisState } from "../state/diagnosis-state.ts";
 import { breachWhere } from "./breach.ts";
@@ -10,13 +10,6 @@ const MANUAL_RESET_CHECKS = ["ck-rollout", "ck-spill-switch", "ck-aux-limit"];
 
 /** The cause written where nothing was proven and nothing is suspected. */
 export const UNKNOWN_CAUSE = "unknown";
-
-/** Something seen or read, in the shape in which evidence is judged. */
-interface Evidence {
-  check: string;
-  finding?: string;
-  outcome?: string;
-}
 
 /** Whether a manual-reset device of this unit was found tripped in this visit. */
 export function foundTripped(state: DiagnosisState): boolean {
@@ -62,14 +55,4 @@ export function isDecided(state: DiagnosisState, body: BodyOf<"cause.concluded">
   return [body.cause, ...(body.also ?? [])]
     .filter(isFaultId)
     .some((fault) => named.some((evidence) => decides(evidence, fault)));
-}
-
-/** Whether one piece of evidence decides a fault: a deciding check with a deciding finding, or one that failed. */
-export function decides(evidence: Evidence, fault: FaultId): boolean {
-  return getFault(fault).decisive.some((decisive) => {
-    if (decisive.check !== evidence.check || evidence.finding === "no-path") return false;
-    const findings: readonly string[] = decisive.findings ?? [];
-    if (evidence.finding !== undefined && findings.length > 0) return findings.includes(evidence.finding);
-    return evidence.outcome === "fail" || evidence.outcome === "marginal";
-  });
 }
