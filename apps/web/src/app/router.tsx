@@ -1,23 +1,28 @@
 import { createBrowserRouter, Navigate } from "react-router-dom";
-import { loadTradeWords } from "#lib/i18n.ts";
+import { loadDeskWords, loadTradeWords } from "#lib/i18n.ts";
 import { paths } from "#lib/paths.ts";
 import { FailedScreen } from "./failed-screen.tsx";
 import { NotFoundScreen } from "./not-found-screen.tsx";
 import { RequireSession } from "./require-session.tsx";
 import { DeskLayout } from "./layouts/desk-layout.tsx";
 
-/** Loads a screen, and the trade's words with it where the screen shows any. */
+/** Loads a screen with its words: the desk's, where it is not one of the first, and the trade's, where it shows any. */
 function screen<M>(
   load: () => Promise<M>,
   pick: (module: M) => React.ComponentType,
-  options: { trade?: boolean } = {},
+  options: { trade?: boolean; first?: boolean } = {},
 ) {
   return async () => {
-    const [module] = await Promise.all([load(), options.trade ? loadTradeWords() : undefined]);
+    const [module] = await Promise.all([
+      load(),
+      options.first ? undefined : loadDeskWords(),
+      options.trade ? loadTradeWords() : undefined,
+    ]);
     return { Component: pick(module) };
   };
 }
 const trade = { trade: true };
+const first = { first: true };
 
 /** Routes compose features; a feature is fetched when its screen is first opened. */
 export const router = createBrowserRouter([
@@ -29,6 +34,7 @@ export const router = createBrowserRouter([
         lazy: screen(
           () => import("#features/sign-in/sign-in-screen.tsx"),
           (m) => m.SignInScreen,
+          first,
         ),
       },
       {
@@ -110,6 +116,7 @@ export const router = createBrowserRouter([
                 lazy: screen(
                   () => import("#features/calls/calls-screen.tsx"),
                   (m) => m.CallsScreen,
+                  first,
                 ),
               },
               {

@@ -1,9 +1,10 @@
-import { can, readMe } from "@emberladder/contract";
+import { can } from "@emberladder/contract";
 import type { Me, Permission } from "@emberladder/contract";
 import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { createContext, useContext, useEffect, useMemo } from "react";
 import type { ReactNode } from "react";
 import { ApiProblem, callApi } from "./api-client.ts";
+import { readMe } from "./shell-routes.ts";
 
 const KEY = ["me"];
 const STORED = "emberladder.me";

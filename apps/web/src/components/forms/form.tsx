@@ -1,14 +1,14 @@
-import { zodResolver } from "@hookform/resolvers/zod";
 import { createContext, useContext, useEffect, useId, useRef, useState } from "react";
 import type { ReactNode } from "react";
 import { FormProvider, useForm } from "react-hook-form";
 import type { DefaultValues, FieldPath, FieldValues } from "react-hook-form";
 import { useTranslation } from "react-i18next";
-import type { z } from "zod";
 import { ApiProblem } from "#lib/api-client.ts";
 import { useProblemWords } from "#lib/problem-words.ts";
 import { ErrorSummary } from "./error-summary.tsx";
 import { listErrors } from "./list-errors.ts";
+import { resolveBy } from "./resolve-by.ts";
+import type { SchemaSource } from "./resolve-by.ts";
 import { SubmitButton } from "./submit-button.tsx";
 import { useIssueWords } from "./use-issue-words.ts";
 
@@ -33,7 +33,8 @@ export function Form<Input extends FieldValues, Output>({
   aside,
   children,
 }: {
-  schema: z.ZodType<Output, Input>;
+  /** The schema, or how to fetch it: it is asked for at once and needed when the form is sent. */
+  schema: SchemaSource<Input, Output>;
   defaults: DefaultValues<Input>;
   /** Says what is stored or done. */
   submitLabel: string;
@@ -51,7 +52,7 @@ export function Form<Input extends FieldValues, Output>({
   const summary = useRef<HTMLDivElement>(null);
   const sending = useRef(false);
   const form = useForm<Input, unknown, Output>({
-    resolver: zodResolver<Input, unknown, Output>(schema, { error: issueWords }),
+    resolver: resolveBy(schema, issueWords),
     defaultValues: defaults,
     mode: "onSubmit",
     reValidateMode: "onSubmit",
@@ -60,6 +61,10 @@ export function Form<Input extends FieldValues, Output>({
   const errors = listErrors(form.formState.errors);
   const hasErrors = errors.length > 0;
 
+  useEffect(() => {
+    // A failed fetch is tried again, and told, when the form is sent.
+    if (typeof schema === "function") void schema().catch(() => undefined);
+  }, [schema]);
   useEffect(() => {
     if (failures > 0) summary.current?.focus();
   }, [failures]);

@@ -1,6 +1,6 @@
-import { CALL_STATUSES } from "@emberladder/contract";
 import { useTranslation } from "react-i18next";
 import { useSearchParams } from "react-router-dom";
+import { CALL_STATUSES } from "./calls-query.ts";
 import type { CallFilter } from "./calls-query.ts";
 
 const control =

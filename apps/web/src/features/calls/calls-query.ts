@@ -1,7 +1,15 @@
-import { CALL_STATUSES, listCalls, readCall } from "@emberladder/contract";
-import type { AnswerOf, Call, CallDetail, CallStatus } from "@emberladder/contract";
+import type { AnswerOf, Call, CallDetail, CallStatus, listCalls as ListCalls } from "@emberladder/contract";
 import { ApiProblem, callApi } from "#lib/api-client.ts";
+import { listCalls, readCall } from "#lib/shell-routes.ts";
 import { addDays } from "#lib/site-time.ts";
+
+/** States of a call, in the order of its life. The contract has them beside its schemas, which come later. */
+export const CALL_STATUSES = [
+  "open",
+  "under-way",
+  "done",
+  "cancelled",
+] as const satisfies readonly CallStatus[];
 
 /** What the list of calls shows, as its address says it. */
 export interface CallFilter {
@@ -15,7 +23,7 @@ export interface CallFilter {
 /** A list of calls: what is left from earlier days, then the page that was asked for. */
 export interface CallList {
   leftOver: Call[];
-  page: AnswerOf<typeof listCalls>;
+  page: AnswerOf<typeof ListCalls>;
 }
 
 const isDay = (text: string | null): text is string =>

@@ -1,4 +1,3 @@
-import { signIn } from "@emberladder/contract";
 import { useQueryClient } from "@tanstack/react-query";
 import { useTranslation } from "react-i18next";
 import { Link } from "react-router-dom";
@@ -9,8 +8,10 @@ import { callApi } from "#lib/api-client.ts";
 import { describeDevice, lastDeviceId } from "#lib/device-name.ts";
 import { enterSession } from "#lib/enter-session.ts";
 import { paths } from "#lib/paths.ts";
+import { signIn } from "#lib/shell-routes.ts";
 
-const schema = signIn.body.omit({ device: true });
+// The schema is fetched while the person types.
+const loadSchema = () => import("./sign-in-schema.ts").then((module) => module.signInSchema);
 
 /** E-mail and password. The device offers the id it had before, so that its record goes on counting. */
 export function PasswordStep() {
@@ -19,7 +20,7 @@ export function PasswordStep() {
   return (
     <>
       <Form
-        schema={schema}
+        schema={loadSchema}
         defaults={{ email: "", password: "" }}
         submitLabel={t("desk:signIn.submit")}
         onSubmit={async (values) => {

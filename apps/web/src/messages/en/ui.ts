@@ -1,7 +1,3 @@
-import { field } from "./field.ts";
-import { review } from "./review.ts";
-import { rules } from "./rules.ts";
-
 /** The screens' own words in English. Trade words (checks, faults, rungs) are in `@emberladder/words`. */
 export const ui = {
   nav: {
@@ -87,7 +83,4 @@ export const ui = {
     putBackLabel: "Put back: {{count}} still out",
     safety: "Smell gas? CO alarm?",
   },
-  ...field,
-  review,
-  rules,
 } as const;

@@ -1,0 +1,33 @@
+import { set } from "react-hook-form";
+import type { FieldError, FieldErrors, FieldValues, Resolver } from "react-hook-form";
+import type { z } from "zod";
+
+type Schema<Input, Output> = z.ZodType<Output, Input>;
+/** A schema, or a function that fetches it, for forms that are drawn before their schema is here. */
+export type SchemaSource<Input, Output> = Schema<Input, Output> | (() => Promise<Schema<Input, Output>>);
+
+/**
+ * Judges a form by a schema. `words` gives the message of an issue for which the schema has none; the first issue
+ * of a field is the one shown. Written out rather than taken from a library, because the library's one brings all
+ * of zod into the first download.
+ */
+export function resolveBy<Input extends FieldValues, Output>(
+  source: SchemaSource<Input, Output>,
+  words: (issue: object) => string,
+): Resolver<Input, unknown, Output> {
+  return async (values) => {
+    const schema = typeof source === "function" ? await source() : source;
+    const parsed = await schema.safeParseAsync(values, { error: words });
+    if (parsed.success) return { values: parsed.data, errors: {} };
+    const first = new Map<string, FieldError>();
+    for (const { path, code, message } of parsed.error.issues) {
+      const name = path.length > 0 ? path.join(".") : "root.schema";
+      if (!first.has(name)) first.set(name, { type: code, message });
+    }
+    const errors: FieldErrors<Input> = {};
+    // Shorter names first: a list's own error must not replace those of its entries.
+    for (const [name, error] of [...first].toSorted(([a], [b]) => a.length - b.length))
+      set(errors, name, error);
+    return { values: {}, errors };
+  };
+}

@@ -1,0 +1,20 @@
+import type {
+  listCalls as ListCalls,
+  readCall as ReadCall,
+  readMe as ReadMe,
+  RouteContract,
+  signIn as SignIn,
+} from "@emberladder/contract";
+
+/**
+ * The routes that the first screens call, by method and address alone: the contract's schemas come later, with
+ * the first form that is sent. The types are the contract's own, so that an address cannot drift.
+ */
+export const readMe = routeOf<typeof ReadMe>("get", "/api/auth/me");
+export const signIn = routeOf<typeof SignIn>("post", "/api/auth/sign-in");
+export const listCalls = routeOf<typeof ListCalls>("get", "/api/calls");
+export const readCall = routeOf<typeof ReadCall>("get", "/api/calls/{callId}");
+
+function routeOf<C extends RouteContract>(method: C["method"], path: C["path"]): C {
+  return { method, path } as C;
+}
