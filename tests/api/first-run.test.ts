@@ -119,6 +119,7 @@ describe("the environment of a live server", () => {
     ["an address with a path", { PUBLIC_ORIGIN: "https://heat.example/app" }],
     ["an open interface", { HOST: "0.0.0.0" }],
     ["a trusted proxy of everybody", { TRUST_PROXY: "true" }],
+    ["limits lifted for measurements", { RATE_LIMIT_SCALE: "100" }],
     ["another mode", { EMBERLADDER_MODE: "test" }],
     ["a port that is none", { PORT: "70000" }],
     ["another kind of database", { DATABASE_URL: "http://127.0.0.1" }],

@@ -57,7 +57,7 @@ export const CLOCK_TOLERANCE_MINUTES = 5;
  */
 export const RATE_LIMITS = {
   /** Everything: a flood from one address. */
-  address: { requests: 1200, seconds: 60, by: "address", shared: false },
+  address: { requests: 3000, seconds: 60, by: "address", shared: false },
   /** Signed-in requests of one session, about ten a second. */
   session: { requests: 600, seconds: 60, by: "session", shared: false },
   /** Open doors without a session: resets, invitations, first run, report links. */

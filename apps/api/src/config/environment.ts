@@ -49,6 +49,8 @@ const schema = z
           .filter(Boolean),
       )
       .pipe(z.array(z.union([z.ipv4(), z.ipv6(), z.cidrv4(), z.cidrv6(), z.literal("loopback")]))),
+    /** Multiplies the rate limits that only guard against floods; for measurements, never in live. */
+    RATE_LIMIT_SCALE: z.coerce.number().int().min(1).max(10_000).default(1),
     LOG_LEVEL: z.enum(["debug", "info", "warn", "error", "silent"]).default("info"),
   })
   .check((context) => {
@@ -58,6 +60,7 @@ const schema = z
     if (value.EMBERLADDER_MODE === "live") {
       if (!value.PUBLIC_ORIGIN) miss("PUBLIC_ORIGIN", "is missing: the address people use");
       if (!value.SMTP_URL) miss("SMTP_URL", "is missing: the mail server");
+      if (value.RATE_LIMIT_SCALE !== 1) miss("RATE_LIMIT_SCALE", "is for measurements and not for mode live");
     }
     if (!value.PUBLIC_ORIGIN) return;
     const { protocol, hostname, pathname } = new URL(value.PUBLIC_ORIGIN);
@@ -82,6 +85,8 @@ export interface Environment {
   smtpPort: number | undefined;
   webDist: string | undefined;
   trustProxy: string[];
+  /** Factor on the rate limits that only guard against floods. */
+  rateLimitScale: number;
   logLevel: "debug" | "info" | "warn" | "error" | "silent";
 }
 
@@ -116,6 +121,7 @@ export function readEnvironment(variables: Record<string, string | undefined>): 
     smtpPort: value.SMTP_PORT,
     webDist: value.WEB_DIST,
     trustProxy: value.TRUST_PROXY,
+    rateLimitScale: value.RATE_LIMIT_SCALE,
     logLevel: value.LOG_LEVEL,
   };
 }

@@ -23,7 +23,7 @@ export function createApp(dependencies: Dependencies): express.Express {
   const sessions = createSessionKeeper(dependencies);
   const serving = {
     dependencies,
-    limiter: createRateLimiter(database),
+    limiter: createRateLimiter(database, environment.rateLimitScale),
     origins: ownOrigins(environment.publicOrigin, environment.mode),
     readActor: sessions.readActor,
   };

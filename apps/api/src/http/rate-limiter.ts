@@ -14,15 +14,18 @@ export interface RateLimiter {
   take(name: RateLimitName, key: string, now: number): Promise<void>;
 }
 
-/** Counts in the process where that is enough, and in the database where several processes share a budget. */
-export function createRateLimiter(database: Database): RateLimiter {
+/**
+ * Counts in the process where that is enough, and in the database where several processes share a budget.
+ * @param scale factor on what is counted in the process
+ */
+export function createRateLimiter(database: Database, scale = 1): RateLimiter {
   const windows = new Map<string, RateWindow>();
   return {
     take: async (name, key, now) => {
       const { requests, seconds, shared } = RATE_LIMITS[name];
       const request = { key: `${name}\n${key}`, now, seconds };
       const window = shared ? await countShared(database, request) : countHere(windows, request);
-      if (window.hits > requests)
+      if (window.hits > (shared ? requests : requests * scale))
         throw new ApiError("too-many-requests", {
           retryAfterSeconds: Math.max(1, Math.ceil((window.resetsAt - now) / 1000)),
         });
