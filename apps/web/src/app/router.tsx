@@ -28,6 +28,8 @@ const first = { first: true };
 export const router = createBrowserRouter([
   {
     errorElement: <FailedScreen />,
+    // Nothing is drawn until the first screen is here: it takes a moment, and a frame would only jump.
+    HydrateFallback: () => null,
     children: [
       {
         path: "/sign-in",

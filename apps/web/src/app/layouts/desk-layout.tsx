@@ -28,18 +28,18 @@ export function DeskLayout() {
         {t("nav.skip")}
       </a>
       <header className="border-b-3 border-ink bg-surface">
-        <div className="flex min-h-12 flex-wrap items-center gap-x-6 px-4 desk:px-6">
-          <Wordmark />
-          <nav
-            aria-label={t("nav.label")}
-            className="order-last -mx-4 flex w-screen overflow-x-auto px-4 desk:order-none desk:mx-0 desk:w-auto desk:px-0"
-          >
+        {me.company.mode === "demo" && (
+          <p className="border-b border-hair px-4 text-label font-semibold desk:hidden">{t("nav.demo")}</p>
+        )}
+        <div className="flex min-h-12 items-center gap-x-3 px-4 desk:gap-x-6 desk:px-6">
+          <Wordmark isShortOnPhone />
+          <nav aria-label={t("nav.label")} className="flex min-w-0 grow overflow-x-auto desk:grow-0">
             {LINKS.filter((link) => !link.needs || can(link.needs)).map((link) => (
               <NavLink
                 key={link.to}
                 to={link.to}
                 className={({ isActive }) =>
-                  `flex min-h-12 items-center px-3 text-field font-medium whitespace-nowrap text-ink no-underline first:pl-0 desk:text-desk ${isActive ? "shadow-[inset_0_-6px_0_var(--ink)]" : ""}`
+                  `flex min-h-13 items-center px-3 text-field font-medium whitespace-nowrap text-ink no-underline outline-offset-[-3px] desk:min-h-12 desk:text-desk ${isActive ? "shadow-[inset_0_-6px_0_var(--ink)]" : ""}`
                 }
               >
                 {t(link.word)}
@@ -48,12 +48,14 @@ export function DeskLayout() {
           </nav>
           <div className="ml-auto flex items-center gap-3 py-1">
             {me.company.mode === "demo" && (
-              <span className="rounded border-2 border-ink px-2 text-label font-semibold desk:text-small">
+              <span className="hidden rounded border-2 border-ink px-2 text-small font-semibold whitespace-nowrap desk:inline">
                 {t("nav.demo")}
               </span>
             )}
             <span className="hidden text-desk text-quiet desk:inline">{me.company.name}</span>
-            <span className="hidden text-desk text-quiet desk:inline">{me.person.name}</span>
+            <span className="hidden text-desk whitespace-nowrap text-quiet desk:inline">
+              {me.person.name}
+            </span>
             <SchemeSwitch />
           </div>
         </div>

@@ -18,7 +18,9 @@ export function CompanyFields({ prefix = "" }: { prefix?: string }) {
       />
       <datalist id="time-zones">
         {Intl.supportedValuesOf("timeZone").map((zone) => (
-          <option key={zone} value={zone} />
+          <option key={zone} value={zone}>
+            {zone}
+          </option>
         ))}
       </datalist>
       <SelectField

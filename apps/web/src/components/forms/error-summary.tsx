@@ -34,6 +34,10 @@ function FieldLink({ name, message }: { name: string; message: string }) {
       onClick={(event) => {
         event.preventDefault();
         const control = document.getElementById(id);
+        // A field in a folded part can only take the focus once the part is open.
+        for (let part = control?.closest("details"); part; part = part.parentElement?.closest("details")) {
+          part.open = true;
+        }
         control?.scrollIntoView({ block: "center" });
         control?.focus({ preventScroll: true });
       }}

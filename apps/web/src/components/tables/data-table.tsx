@@ -1,68 +1,43 @@
-import {
-  flexRender,
-  getCoreRowModel,
-  getFilteredRowModel,
-  getPaginationRowModel,
-  getSortedRowModel,
-  useReactTable,
-} from "@tanstack/react-table";
-import type { ColumnDef } from "@tanstack/react-table";
 import { useTranslation } from "react-i18next";
 import { ActButton } from "#components/ui/act.tsx";
 import { Pager } from "#components/ui/pager.tsx";
 import { SearchField } from "#components/ui/search-field.tsx";
 import { toCsv } from "#lib/csv.ts";
-import type { CsvCell } from "#lib/csv.ts";
 import { saveFile } from "#lib/save-file.ts";
+import { buildTable } from "./build-table.ts";
+import type { Column } from "./build-table.ts";
 import { useTableParams } from "./use-table-params.ts";
 
 const PAGE_SIZE = 20;
 
 /**
  * A ruled table that sorts, filters, pages and exports. What is chosen stands in the address under `name`, so that
- * a view can be kept and sent; the export has every row that the filter leaves, in the order shown. On narrow
- * screens the table scrolls inside its own box.
+ * a view can be kept and sent; the export has every row that the filter leaves, in the order shown, with the values
+ * of the columns. On narrow screens the table scrolls inside its own box.
  */
-export function DataTable<Row>({
+export function DataTable<Row extends { id: string }>({
   name,
   caption,
   columns,
   rows,
   fileName,
-  toFileRow,
 }: {
   /** Prefix of this table's entries in the address. */
   name: string;
   caption: string;
-  columns: ColumnDef<Row>[];
+  columns: readonly Column<Row>[];
   rows: Row[];
   fileName: string;
-  /** One row of the export; texts are made safe for spreadsheets. */
-  toFileRow: (row: Row) => CsvCell[];
 }) {
   const { t } = useTranslation();
   const view = useTableParams(name);
-  const table = useReactTable({
-    data: rows,
-    columns,
-    state: {
-      sorting: view.sorting,
-      globalFilter: view.filter,
-      pagination: { pageIndex: view.page - 1, pageSize: PAGE_SIZE },
-    },
-    globalFilterFn: "includesString",
-    getColumnCanGlobalFilter: () => true,
-    autoResetPageIndex: false,
-    getCoreRowModel: getCoreRowModel(),
-    getSortedRowModel: getSortedRowModel(),
-    getFilteredRowModel: getFilteredRowModel(),
-    getPaginationRowModel: getPaginationRowModel(),
-  });
-  const headers = table.getFlatHeaders();
-  const left = table.getSortedRowModel().rows;
+  if (rows.length === 0) {
+    return <p className="text-field text-quiet desk:text-desk">{t("desk:table.empty")}</p>;
+  }
+  const shown = buildTable(rows, columns, { ...view, pageSize: PAGE_SIZE });
   const save = () => {
-    const head = headers.map((header) => String(header.column.columnDef.header ?? ""));
-    saveFile(fileName, "text/csv", toCsv([head, ...left.map((row) => toFileRow(row.original))]));
+    const cells = shown.all.map((row) => columns.map((column) => column.value(row)));
+    saveFile(fileName, "text/csv", toCsv([columns.map((column) => column.header), ...cells]));
   };
   return (
     <div>
@@ -75,62 +50,68 @@ export function DataTable<Row>({
           <caption className="sr-only">{caption}</caption>
           <thead>
             <tr className="border-b-2 border-ink text-left">
-              {headers.map((header) => {
-                const sorted = header.column.getIsSorted();
-                return (
-                  <th
-                    key={header.id}
-                    scope="col"
-                    aria-sort={sorted === "asc" ? "ascending" : sorted === "desc" ? "descending" : "none"}
-                    className="p-0"
-                  >
-                    <button
-                      type="button"
-                      onClick={() => view.toggleSort(header.column.id)}
-                      className="flex min-h-12 w-full items-center gap-2 px-2 text-left font-semibold whitespace-nowrap"
-                    >
-                      {flexRender(header.column.columnDef.header, header.getContext())}
-                      <SortMark sorted={sorted} />
-                    </button>
-                  </th>
-                );
-              })}
+              {columns.map((column) => (
+                <SortHeader
+                  key={column.id}
+                  label={column.header}
+                  sorted={view.sorting.find((sort) => sort.id === column.id)}
+                  onSort={() => view.toggleSort(column.id)}
+                />
+              ))}
             </tr>
           </thead>
           <tbody>
-            {table.getRowModel().rows.map((row) => (
+            {shown.page.map((row) => (
               <tr key={row.id} className="border-b border-hair last:border-b-0">
-                {row.getVisibleCells().map((cell) => (
-                  <td key={cell.id} className="px-2 py-2 align-top">
-                    {flexRender(cell.column.columnDef.cell, cell.getContext())}
+                {columns.map((column) => (
+                  <td key={column.id} className="px-2 py-2 align-middle">
+                    {column.renderCell ? column.renderCell(row) : column.value(row)}
                   </td>
                 ))}
               </tr>
             ))}
-            {left.length === 0 && (
+            {shown.all.length === 0 && (
               <tr>
-                <td colSpan={headers.length} className="px-2 py-4 text-quiet">
-                  {t(rows.length === 0 ? "desk:table.empty" : "desk:table.noneLeft")}
+                <td colSpan={columns.length} className="px-2 py-4 text-quiet">
+                  {t("desk:table.noneLeft")}
                 </td>
               </tr>
             )}
           </tbody>
         </table>
       </div>
-      <Pager name={view.pageParam} page={view.page} pageSize={PAGE_SIZE} total={left.length} />
+      <Pager name={view.pageParam} page={view.page} pageSize={PAGE_SIZE} total={shown.all.length} />
     </div>
   );
 }
 
-function SortMark({ sorted }: { sorted: false | "asc" | "desc" }) {
+function SortHeader({
+  label,
+  sorted,
+  onSort,
+}: {
+  label: string;
+  sorted?: { desc: boolean };
+  onSort: () => void;
+}) {
+  const order = sorted ? (sorted.desc ? "descending" : "ascending") : "none";
   return (
-    <svg viewBox="0 0 12 16" width={10} height={14} aria-hidden="true">
-      {sorted !== "desc" && (
-        <path d="M6 1l5 6H1z" fill={sorted ? "var(--ink)" : "none"} stroke="var(--rule)" />
-      )}
-      {sorted !== "asc" && (
-        <path d="M6 15l5-6H1z" fill={sorted ? "var(--ink)" : "none"} stroke="var(--rule)" />
-      )}
-    </svg>
+    <th scope="col" aria-sort={order} className="p-0">
+      <button
+        type="button"
+        onClick={onSort}
+        className="flex min-h-12 w-full items-center gap-2 px-2 text-left font-semibold whitespace-nowrap outline-offset-[-3px]"
+      >
+        {label}
+        <svg viewBox="0 0 12 16" width={10} height={14} aria-hidden="true">
+          {order !== "descending" && (
+            <path d="M6 1l5 6H1z" fill={sorted ? "var(--ink)" : "none"} stroke="var(--rule)" />
+          )}
+          {order !== "ascending" && (
+            <path d="M6 15l5-6H1z" fill={sorted ? "var(--ink)" : "none"} stroke="var(--rule)" />
+          )}
+        </svg>
+      </button>
+    </th>
   );
 }

@@ -1,11 +1,11 @@
 import { confirmTwoStep, setUpTwoStep, twoStepCodeField } from "@emberladder/contract";
 import type { AnswerOf } from "@emberladder/contract";
-import { useEffect, useRef, useState } from "react";
+import { useQuery } from "@tanstack/react-query";
 import { useTranslation } from "react-i18next";
 import { z } from "zod";
 import { Form } from "#components/forms/form.tsx";
 import { TextField } from "#components/forms/text-field.tsx";
-import { ProblemNote } from "#components/ui/list-states.tsx";
+import { LoadingNote, ProblemNote } from "#components/ui/list-states.tsx";
 import { callApi } from "#lib/api-client.ts";
 import { QrCode } from "./qr-code.tsx";
 
@@ -18,28 +18,27 @@ export function SetUpTwoStep({
   onConfirmed: (answer: AnswerOf<typeof confirmTwoStep>) => void;
 }) {
   const { t } = useTranslation();
-  const [made, setMade] = useState<AnswerOf<typeof setUpTwoStep> | null>(null);
-  const [problem, setProblem] = useState<unknown>(null);
-  const asked = useRef(false);
-  const ask = () => {
-    setProblem(null);
-    callApi(setUpTwoStep, { body: {} }).then(setMade, setProblem);
-  };
-  useEffect(() => {
-    // Each request makes a new secret, so a second one would void the picture already scanned.
-    if (asked.current) return;
-    asked.current = true;
-    ask();
-  }, []);
-  if (problem) return <ProblemNote problem={problem} onRetry={ask} />;
-  if (!made) return null;
+  // Each request makes a new secret, so it is asked for once and never again behind a picture already scanned.
+  const made = useQuery({
+    queryKey: ["two-step-set-up"],
+    queryFn: () => callApi(setUpTwoStep, { body: {} }),
+    staleTime: Infinity,
+    gcTime: 0,
+    retry: false,
+    refetchOnWindowFocus: false,
+    refetchOnReconnect: false,
+  });
+  if (made.isError) return <ProblemNote problem={made.error} onRetry={() => void made.refetch()} />;
+  if (made.isPending) return <LoadingNote />;
   return (
     <div className="flex flex-col gap-5">
       <p className="text-field desk:text-desk">{t("desk:twoStep.scan")}</p>
-      <QrCode text={made.uri} label={t("desk:twoStep.picture")} />
+      <QrCode text={made.data.uri} label={t("desk:twoStep.picture")} />
       <div>
         <p className="text-field text-quiet desk:text-desk">{t("desk:twoStep.typeSecret")}</p>
-        <p className="numeric text-field font-semibold break-all select-all">{groupsOfFour(made.secret)}</p>
+        <p className="numeric text-field font-semibold break-all select-all">
+          {groupsOfFour(made.data.secret)}
+        </p>
       </div>
       <Form
         schema={schema}

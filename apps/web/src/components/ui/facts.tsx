@@ -7,7 +7,7 @@ export function Facts({ rows }: { rows: readonly { name: string; value: ReactNod
       {rows.map((row) => (
         <div
           key={row.name}
-          className="grid gap-x-4 border-b border-hair py-2 last:border-b-0 min-[30rem]:grid-cols-[12rem_1fr]"
+          className="grid gap-x-4 border-b border-hair py-2 last:border-b-0 grid-cols-[minmax(0,9fr)_minmax(0,11fr)] desk:grid-cols-[12rem_1fr]"
         >
           <dt className="text-field text-quiet desk:text-desk">{row.name}</dt>
           <dd

@@ -25,9 +25,9 @@ export function PageHead({
           {back.label}
         </Link>
       )}
-      <div className="flex flex-wrap items-center justify-between gap-x-6 gap-y-3">
+      <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-2">
         <div className="min-w-0">
-          <h1 className="text-question break-words">{title}</h1>
+          <h1 className="text-question break-words short:text-[1.375rem] short:leading-6.5">{title}</h1>
           {line && <div className="text-field text-quiet desk:text-desk">{line}</div>}
         </div>
         {acts && <div className="flex flex-wrap gap-3">{acts}</div>}

@@ -1,5 +1,8 @@
-/** The product's name with its mark: four rungs of a ladder, two of them lit. */
-export function Wordmark() {
+/**
+ * The product's name with its mark: four rungs of a ladder, two of them lit. Where room is short on a phone, only
+ * the mark is drawn and the name is still spoken.
+ */
+export function Wordmark({ isShortOnPhone = false }: { isShortOnPhone?: boolean }) {
   return (
     <span className="flex items-center gap-2 py-2 text-field font-bold">
       <svg viewBox="0 0 20 26" width={20} height={26} aria-hidden="true">
@@ -8,7 +11,9 @@ export function Wordmark() {
         <path d="M1 17h18M1 22h18" stroke="var(--proven)" strokeWidth={3.2} />
       </svg>
       {/* The name is the same in every language. */}
-      <span translate="no">{PRODUCT}</span>
+      <span translate="no" className={isShortOnPhone ? "sr-only desk:not-sr-only" : undefined}>
+        {PRODUCT}
+      </span>
     </span>
   );
 }

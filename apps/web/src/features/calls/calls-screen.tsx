@@ -12,6 +12,7 @@ import { useKeptQuery } from "#lib/kept-query.ts";
 import { paths } from "#lib/paths.ts";
 import { useMe, useSession } from "#lib/session.tsx";
 import { dayOf, formatLongDay, formatMoment, formatTime } from "#lib/site-time.ts";
+import { useNow } from "#lib/use-now.ts";
 import { CallFilters } from "./call-filters.tsx";
 import { CallRow } from "./call-row.tsx";
 import { fetchCalls, isPlain, keepCalls, readCallFilter } from "./calls-query.ts";
@@ -20,11 +21,12 @@ import { fetchCalls, isPlain, keepCalls, readCallFilter } from "./calls-query.ts
 export function CallsScreen() {
   const { t } = useTranslation();
   const me = useMe();
+  const now = useNow(true, 60_000);
   const { can } = useSession();
   const [search] = useSearchParams();
   const filter = readCallFilter(search);
   const { timeZone } = me.company;
-  const today = dayOf(Date.now(), timeZone);
+  const today = dayOf(now, timeZone);
   const calls = useKeptQuery(
     `calls:${me.person.id}:${JSON.stringify(filter)}:${today}`,
     (signal) => fetchCalls(filter, today, signal),
@@ -39,9 +41,7 @@ export function CallsScreen() {
   return (
     <>
       <PageHead
-        title={
-          filter.date ? formatLongDay(`${filter.date}T12:00:00Z`, "UTC") : formatLongDay(Date.now(), timeZone)
-        }
+        title={filter.date ? formatLongDay(`${filter.date}T12:00:00Z`, "UTC") : formatLongDay(now, timeZone)}
         line={
           calls.data &&
           t("desk:calls.count", { count: calls.data.value.page.total + calls.data.value.leftOver.length })

@@ -1,5 +1,6 @@
 import { createCall, dateField, idField, listPeople, readUnit } from "@emberladder/contract";
 import { useQuery, useQueryClient } from "@tanstack/react-query";
+import { useState } from "react";
 import { useTranslation } from "react-i18next";
 import { z } from "zod";
 import { Form } from "#components/forms/form.tsx";
@@ -20,6 +21,7 @@ const schema = z.strictObject({
 export function NewCallForm({ unitId, onMade }: { unitId: string; onMade: (callId: string) => void }) {
   const { t } = useTranslation();
   const me = useMe();
+  const [now] = useState(() => Date.now());
   const { can } = useSession();
   const client = useQueryClient();
   const unit = useQuery({
@@ -34,7 +36,6 @@ export function NewCallForm({ unitId, onMade }: { unitId: string; onMade: (callI
   if (!unit.data) return null;
   const timeZone = unit.data.site.timeZone ?? me.company.timeZone;
   const others = people.data?.items.filter((person) => person.state === "active") ?? [me.person];
-  const now = Date.now();
   return (
     <div className="max-w-150">
       <Form

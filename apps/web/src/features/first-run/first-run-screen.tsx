@@ -51,7 +51,7 @@ export function FirstRunScreen() {
         defaults={{
           company: {
             name: "",
-            timeZone: Intl.DateTimeFormat().resolvedOptions().timeZone,
+            timeZone: new Intl.DateTimeFormat().resolvedOptions().timeZone,
             altitudeRule: "4-above-2000",
             unitsShown: "inch-pound",
           },

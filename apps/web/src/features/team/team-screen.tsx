@@ -1,10 +1,9 @@
 import { listPeople } from "@emberladder/contract";
 import type { Person } from "@emberladder/contract";
 import { useQuery } from "@tanstack/react-query";
-import type { ColumnDef } from "@tanstack/react-table";
-import { useCallback, useMemo } from "react";
 import { useTranslation } from "react-i18next";
 import { useSearchParams } from "react-router-dom";
+import type { Column } from "#components/tables/build-table.ts";
 import { DataTable } from "#components/tables/data-table.tsx";
 import { ActButton, ActLink } from "#components/ui/act.tsx";
 import { LoadingNote, ProblemNote } from "#components/ui/list-states.tsx";
@@ -25,62 +24,54 @@ export function TeamScreen() {
   const people = useQuery({ queryKey: ["people"], queryFn: ({ signal }) => callApi(listPeople, { signal }) });
   const open = search.get("person");
   const isInviting = search.get("invite") !== null;
-  const show = useCallback(
-    (change: { person?: string; invite?: string }) =>
-      setSearch((before) => {
-        const next = new URLSearchParams(before);
-        for (const name of ["person", "invite"] as const) {
-          const value = change[name];
-          if (value) next.set(name, value);
-          else next.delete(name);
-        }
-        return next;
-      }),
-    [setSearch],
-  );
-  const columns = useMemo<ColumnDef<Person>[]>(
-    () => [
-      {
-        id: "name",
-        header: t("desk:team.name"),
-        accessorFn: (row) => row.name,
-        cell: ({ row }) =>
-          can("person:manage") ? (
-            <button
-              type="button"
-              aria-pressed={open === row.original.id}
-              className="min-h-12 text-left font-semibold text-link underline underline-offset-4 aria-pressed:text-ink desk:min-h-9"
-              onClick={() => show({ person: row.original.id })}
-            >
-              {row.original.name}
-            </button>
-          ) : (
-            row.original.name
-          ),
-      },
-      { id: "email", header: t("desk:signIn.email"), accessorFn: (row) => row.email },
-      { id: "role", header: t("desk:team.role"), accessorFn: (row) => t(`desk:roles.${row.role}`) },
-      { id: "state", header: t("desk:team.state"), accessorFn: (row) => t(`desk:personStates.${row.state}`) },
-      {
-        id: "twoStep",
-        header: t("desk:team.twoStep"),
-        accessorFn: (row) => t(row.hasTwoStep ? "desk:form.yes" : "desk:form.no"),
-      },
-      {
-        id: "lastSeen",
-        header: t("desk:team.lastSeen"),
-        accessorFn: (row) => row.lastSeenAt ?? "",
-        cell: ({ row }) => (
-          <span className="numeric whitespace-nowrap">
-            {row.original.lastSeenAt
-              ? formatMoment(row.original.lastSeenAt, company.timeZone)
-              : t("desk:team.never")}
-          </span>
+  const show = (change: { person?: string; invite?: string }) =>
+    setSearch((before) => {
+      const next = new URLSearchParams(before);
+      for (const name of ["person", "invite"] as const) {
+        const value = change[name];
+        if (value) next.set(name, value);
+        else next.delete(name);
+      }
+      return next;
+    });
+  const columns: Column<Person>[] = [
+    {
+      id: "name",
+      header: t("desk:team.name"),
+      value: (row) => row.name,
+      renderCell: (row) =>
+        can("person:manage") ? (
+          <button
+            type="button"
+            aria-pressed={open === row.id}
+            className="min-h-12 text-left font-semibold text-link underline underline-offset-4 aria-pressed:text-ink desk:min-h-9"
+            onClick={() => show({ person: row.id })}
+          >
+            {row.name}
+          </button>
+        ) : (
+          row.name
         ),
-      },
-    ],
-    [t, can, open, show, company.timeZone],
-  );
+    },
+    { id: "email", header: t("desk:signIn.email"), value: (row) => row.email },
+    { id: "role", header: t("desk:team.role"), value: (row) => t(`desk:roles.${row.role}`) },
+    { id: "state", header: t("desk:team.state"), value: (row) => t(`desk:personStates.${row.state}`) },
+    {
+      id: "twoStep",
+      header: t("desk:team.twoStep"),
+      value: (row) => t(row.hasTwoStep ? "desk:form.yes" : "desk:form.no"),
+    },
+    {
+      id: "lastSeen",
+      header: t("desk:team.lastSeen"),
+      value: (row) => row.lastSeenAt ?? "",
+      renderCell: (row) => (
+        <span className="numeric whitespace-nowrap">
+          {row.lastSeenAt ? formatMoment(row.lastSeenAt, company.timeZone) : t("desk:team.never")}
+        </span>
+      ),
+    },
+  ];
   if (people.isPending) return <LoadingNote />;
   if (people.isError) return <ProblemNote problem={people.error} onRetry={() => void people.refetch()} />;
   const person = people.data.items.find((one) => one.id === open);
@@ -107,14 +98,6 @@ export function TeamScreen() {
             columns={columns}
             rows={people.data.items}
             fileName="team.csv"
-            toFileRow={(row) => [
-              row.name,
-              row.email,
-              t(`desk:roles.${row.role}`),
-              t(`desk:personStates.${row.state}`),
-              t(row.hasTwoStep ? "desk:form.yes" : "desk:form.no"),
-              row.lastSeenAt,
-            ]}
           />
         </div>
         {hasPanel && (

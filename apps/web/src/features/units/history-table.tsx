@@ -1,8 +1,7 @@
 import type { DiagnosisSummary } from "@emberladder/contract";
-import type { ColumnDef } from "@tanstack/react-table";
-import { useMemo } from "react";
 import { useTranslation } from "react-i18next";
 import { Link } from "react-router-dom";
+import type { Column } from "#components/tables/build-table.ts";
 import { DataTable } from "#components/tables/data-table.tsx";
 import { paths } from "#lib/paths.ts";
 import { formatMoment } from "#lib/site-time.ts";
@@ -18,47 +17,34 @@ export function HistoryTable({
   timeZone: string;
 }) {
   const { t } = useTranslation();
-  const columns = useMemo<ColumnDef<DiagnosisSummary>[]>(
-    () => [
-      {
-        id: "openedAt",
-        header: t("desk:history.opened"),
-        accessorFn: (row) => row.openedAt,
-        cell: ({ row }) => (
-          <Link
-            to={paths.reviewOf(row.original.id)}
-            className="numeric inline-flex min-h-12 items-center whitespace-nowrap desk:min-h-8"
-          >
-            {formatMoment(row.original.openedAt, timeZone)}
-          </Link>
-        ),
-      },
-      {
-        id: "call",
-        header: t("desk:history.call"),
-        accessorFn: (row) => row.callNumber,
-        cell: ({ row }) => <span className="numeric">{row.original.callNumber}</span>,
-      },
-      { id: "technician", header: t("desk:history.technician"), accessorFn: (row) => row.technician.name },
-      {
-        id: "outcome",
-        header: t("desk:history.outcome"),
-        accessorFn: (row) => t(`desk:outcomes.${row.outcome ?? "open"}`),
-      },
-      {
-        id: "lastStage",
-        header: t("desk:history.lastStage"),
-        accessorFn: (row) => (row.lastStage ? t(`trade:stages.${row.lastStage}.name`) : ""),
-      },
-      {
-        id: "flags",
-        header: t("desk:history.flags"),
-        accessorFn: (row) => row.flags,
-        cell: ({ row }) => <span className="numeric">{row.original.flags}</span>,
-      },
-    ],
-    [t, timeZone],
-  );
+  const columns: Column<DiagnosisSummary>[] = [
+    {
+      id: "opened",
+      header: t("desk:history.opened"),
+      value: (row) => row.openedAt,
+      renderCell: (row) => (
+        <Link
+          to={paths.reviewOf(row.id)}
+          className="numeric inline-flex min-h-12 items-center whitespace-nowrap desk:min-h-9"
+        >
+          {formatMoment(row.openedAt, timeZone)}
+        </Link>
+      ),
+    },
+    { id: "call", header: t("desk:history.call"), value: (row) => row.callNumber },
+    { id: "technician", header: t("desk:history.technician"), value: (row) => row.technician.name },
+    {
+      id: "outcome",
+      header: t("desk:history.outcome"),
+      value: (row) => t(`desk:outcomes.${row.outcome ?? "open"}`),
+    },
+    {
+      id: "lastStage",
+      header: t("desk:history.lastStage"),
+      value: (row) => (row.lastStage ? t(`trade:stages.${row.lastStage}.name`) : ""),
+    },
+    { id: "flags", header: t("desk:history.flags"), value: (row) => row.flags },
+  ];
   return (
     <DataTable
       name="history"
@@ -66,14 +52,6 @@ export function HistoryTable({
       columns={columns}
       rows={history}
       fileName="unit-history.csv"
-      toFileRow={(row) => [
-        row.openedAt,
-        row.callNumber,
-        row.technician.name,
-        t(`desk:outcomes.${row.outcome ?? "open"}`),
-        row.lastStage ? t(`trade:stages.${row.lastStage}.name`) : "",
-        row.flags,
-      ]}
     />
   );
 }

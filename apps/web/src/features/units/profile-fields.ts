@@ -121,7 +121,7 @@ const OPTION_APPLIES: Record<OptionFlag, Applies> = {
   "multi-tap": always,
   // Follows from the altitude of the site, so it is never asked.
   altitude: () => false,
-  "gas-meter": (codes) => codes.fuel === "LP",
+  "gas-meter": always,
   "start-check": hasInducer,
   zoned: isIndoors,
   "tc-cutout": hasPilotFlame,

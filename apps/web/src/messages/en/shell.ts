@@ -111,6 +111,7 @@ export const shell = {
     anyStatus: "Any state",
     day: "Day",
     today: "Today",
+    fromToday: "from today on",
     leftOver: "Left from earlier days",
     next: "Next",
     nobody: "Nobody yet",

@@ -5,7 +5,7 @@ import { useTranslation } from "react-i18next";
 import { SelectField } from "#components/forms/select-field.tsx";
 import { TextField } from "#components/forms/text-field.tsx";
 import { ActButton } from "#components/ui/act.tsx";
-import { FieldGrid, FormPart } from "./form-part.tsx";
+import { FieldGrid, FoldedPart } from "./form-part.tsx";
 
 const WITH_BAND = CHECK_IDS.filter((check) => bandsOf(check).length > 0);
 
@@ -14,7 +14,7 @@ export function BandsFields() {
   const { t } = useTranslation();
   const { fields, append, remove } = useFieldArray({ name: "profile.bands" });
   return (
-    <FormPart title={t("desk:unit.bands")} note={t("desk:unit.bandsAsk")}>
+    <FoldedPart title={t("desk:unit.bands")} aside={String(fields.length)} note={t("desk:unit.bandsAsk")}>
       {fields.map((field, index) => (
         <fieldset key={field.id} className="border-b border-hair py-3">
           <legend className="sr-only">{t("desk:bands.number", { number: index + 1 })}</legend>
@@ -35,7 +35,7 @@ export function BandsFields() {
           {t("desk:bands.add")}
         </ActButton>
       </div>
-    </FormPart>
+    </FoldedPart>
   );
 }
 

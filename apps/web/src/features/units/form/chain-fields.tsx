@@ -65,7 +65,7 @@ export function ChainFields() {
       <ol id={id} tabIndex={-1} className="my-3 border-t border-hair">
         {order.map((device, index) => (
           <li key={device} className="flex flex-wrap items-center gap-2 border-b border-hair py-2">
-            <span className="min-w-40 grow text-field desk:text-desk">
+            <span className="min-w-28 flex-1 text-field desk:text-desk">
               <span className="numeric mr-2">{index + 1}</span>
               {name(device)}
             </span>

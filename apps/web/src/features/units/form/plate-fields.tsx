@@ -1,19 +1,23 @@
+import { useWatch } from "react-hook-form";
 import { useTranslation } from "react-i18next";
 import { NumberField } from "#components/forms/number-field.tsx";
 import { SelectField } from "#components/forms/select-field.tsx";
 import { plateFieldsFor, timingFieldsFor } from "../profile-fields.ts";
 import type { PlateField } from "../profile-fields.ts";
-import { FieldGrid, FormPart } from "./form-part.tsx";
+import { countKnown } from "./count-known.ts";
+import { FieldGrid, FoldedPart, FormPart } from "./form-part.tsx";
 import { useCodes } from "./use-codes.ts";
 
 /** Figures of the plate and timings of the control, as they are printed: always in the plate's own units. */
 export function PlateFields() {
   const { t } = useTranslation();
   const codes = useCodes();
+  const timings = useWatch({ name: "profile.timings" }) as object | undefined;
+  const timingFields = timingFieldsFor(codes);
   return (
     <>
       <FormPart title={t("desk:unit.plate")} note={t("desk:unit.plateAsk")}>
-        <FieldGrid>
+        <FieldGrid isPaired>
           <NumberField
             name="profile.altitudeFt"
             label={t("desk:unit.altitude")}
@@ -25,9 +29,13 @@ export function PlateFields() {
           ))}
         </FieldGrid>
       </FormPart>
-      <FormPart title={t("desk:unit.timings")} note={t("desk:unit.timingsAsk")}>
-        <FieldGrid>
-          {timingFieldsFor(codes).map(({ name, unit }) => (
+      <FoldedPart
+        title={t("desk:unit.timings")}
+        aside={t("desk:unit.known", { known: countKnown(timings), count: timingFields.length })}
+        note={t("desk:unit.timingsAsk")}
+      >
+        <FieldGrid isPaired>
+          {timingFields.map(({ name, unit }) => (
             <NumberField
               key={name}
               name={`profile.timings.${name}`}
@@ -36,7 +44,7 @@ export function PlateFields() {
             />
           ))}
         </FieldGrid>
-      </FormPart>
+      </FoldedPart>
     </>
   );
 }
