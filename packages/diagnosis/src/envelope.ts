@@ -60,14 +60,16 @@ export interface ServerStamp {
 
 export type StoredEvent = Envelope & ServerStamp;
 
+/** The fields that are hashed: the envelope's own, whatever a server or a phone keeps beside them. */
+const HASHED_FIELDS = Object.keys(envelopeSchema.omit({ hash: true }).shape) as (keyof UnhashedEnvelope)[];
+
 /**
  * The canonical text of an envelope without its hash, by RFC 8785 (JSON Canonicalization Scheme). This text
  * is what is hashed and what is stored; a database's own re-serialisation is never hashed.
  * @throws when the body holds something JSON cannot carry.
  */
 export function canonicalText(envelope: UnhashedEnvelope): string {
-  const { hash: _dropped, ...rest } = envelope as Envelope;
-  const text = canonicalize(rest);
+  const text = canonicalize(Object.fromEntries(HASHED_FIELDS.map((field) => [field, envelope[field]])));
   if (text === undefined) throw new Error("An event body cannot be written as JSON.");
   return text;
 }

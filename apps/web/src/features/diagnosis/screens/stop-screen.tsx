@@ -1,4 +1,5 @@
 import { command, nextAct, openStops, urgentStop } from "@emberladder/diagnosis";
+import type { Command, DiagnosisState } from "@emberladder/diagnosis";
 import { STOP_RULE_CODES } from "@emberladder/furnace";
 import { useTranslation } from "react-i18next";
 import { Link, Navigate } from "react-router-dom";
@@ -74,6 +75,7 @@ export function StopScreen() {
               const note = given.text ? makeNote(given.text) : undefined;
               void recordAndGoOn(
                 [
+                  ...changesOfAct(act.id, state),
                   command("stop.act-recorded", {
                     rule: stop.rule,
                     act: act.id,
@@ -101,4 +103,18 @@ export function StopScreen() {
       <UndoLine />
     </FieldLayout>
   );
+}
+
+const SHUTS_GAS = ["gas-shut", "appliances-off", "appliance-off", "shut-down"];
+const CUTS_POWER = ["power-off", "breaker-off", "de-energised"];
+
+/** What an act of a stop rule changes on the unit, and on the put-back list: a valve shut has to open again. */
+function changesOfAct(act: string, state: DiagnosisState): Command[] {
+  if (CUTS_POWER.includes(act) && state.unit.power === "on")
+    return [command("unit-state.set", { power: "off" })];
+  if (!SHUTS_GAS.includes(act) || state.unit.gas === "shut") return [];
+  return [
+    command("unit-state.set", { gas: "shut", calling: false }),
+    command("put-back.opened", { kind: "valve-closed", what: "unit-gas-valve" }),
+  ];
 }

@@ -2,11 +2,14 @@ import type { MetAct, MetStop } from "@emberladder/diagnosis";
 import { actPasses, getCheck } from "@emberladder/furnace";
 import { useId, useState } from "react";
 import { useTranslation } from "react-i18next";
+import { Link } from "react-router-dom";
 import { PlainButton, PrimaryButton } from "#components/ui/button.tsx";
 import { ReadingField } from "#components/ui/reading-field.tsx";
 import { TextAreaField } from "#components/ui/text-area-field.tsx";
+import { paths } from "#lib/paths.ts";
 import { parseReading } from "#lib/parse-reading.ts";
 import { useNow } from "#lib/use-now.ts";
+import { useDiagnosis } from "../diagnosis-context.tsx";
 import { StepTimer } from "../parts/step-timer.tsx";
 
 /**
@@ -62,12 +65,24 @@ function ActInput({
   onDone: (given: { value?: number; text?: string }) => void;
 }) {
   const { t } = useTranslation();
+  const { diagnosisId } = useDiagnosis();
   const [text, setText] = useState("");
   const [since, setSince] = useState<number | null>(null);
   const hintId = useId();
   const now = useNow(since !== null);
   switch (act.kind) {
     case "tick":
+      // A look that the rule asks for is taken as a check, so that what was seen is on record.
+      if (act.check) {
+        return (
+          <Link
+            to={`${paths.diagnosis.check(diagnosisId)}?check=${act.check}`}
+            className="flex min-h-14 items-center justify-center rounded bg-ink px-4 text-[1.25rem] font-semibold text-ground no-underline"
+          >
+            {t("stop.takeCheck")}
+          </Link>
+        );
+      }
       return <PrimaryButton onClick={() => onDone({})}>{t("stop.doneButton")}</PrimaryButton>;
     case "timer":
       return (

@@ -1,4 +1,4 @@
-import { command } from "@emberladder/diagnosis";
+import { command, stopFor } from "@emberladder/diagnosis";
 import { useState } from "react";
 import { useTranslation } from "react-i18next";
 import { AnswerButton } from "#components/ui/answer-button.tsx";
@@ -30,7 +30,11 @@ export function BeforeWatch() {
   const needsWait = resets === "some" || resets === "unknown";
   const numbers = readings.map((reading) => (reading.ok && reading.value !== "OL" ? reading.value : null));
   const [boxPct, ventPct] = numbers;
-  const ready = resets === "none" || (needsWait && shutSince !== null && boxPct !== null && ventPct !== null);
+  // A rule against firing lets a call be watched with the gas shut: nothing can burn then.
+  const mustShut = stopFor(state, "call-for-heat")?.stops === "firing";
+  const ready =
+    !mustShut &&
+    (resets === "none" || (needsWait && shutSince !== null && boxPct !== null && ventPct !== null));
 
   const start = () => {
     void record([
@@ -64,6 +68,18 @@ export function BeforeWatch() {
     >
       <h1 className="text-question">{t("watch.resets")}</h1>
       <RefusalNote />
+      {mustShut && (
+        <AnswerButton
+          onChoose={() =>
+            void record([
+              command("unit-state.set", { gas: "shut" }),
+              command("put-back.opened", { kind: "valve-closed", what: "unit-gas-valve" }),
+            ])
+          }
+        >
+          {t("watch.shutForWatch")}
+        </AnswerButton>
+      )}
       <AnswerButton chosen={resets === "none"} onChoose={() => setResets("none")}>
         {t("watch.resetsNone")}
       </AnswerButton>
