@@ -2,6 +2,7 @@ import type {
   listCalls as ListCalls,
   readCall as ReadCall,
   readMe as ReadMe,
+  readUnit as ReadUnit,
   RouteContract,
   signIn as SignIn,
 } from "@emberladder/contract";
@@ -14,6 +15,7 @@ export const readMe = routeOf<typeof ReadMe>("get", "/api/auth/me");
 export const signIn = routeOf<typeof SignIn>("post", "/api/auth/sign-in");
 export const listCalls = routeOf<typeof ListCalls>("get", "/api/calls");
 export const readCall = routeOf<typeof ReadCall>("get", "/api/calls/{callId}");
+export const readUnit = routeOf<typeof ReadUnit>("get", "/api/units/{unitId}");
 
 function routeOf<C extends RouteContract>(method: C["method"], path: C["path"]): C {
   return { method, path } as C;

@@ -1,3 +1,4 @@
+import { useState } from "react";
 import type { Ref } from "react";
 import { useTranslation } from "react-i18next";
 import { useControlId } from "./form.tsx";
@@ -26,7 +27,9 @@ export function ErrorSummary({ errors, ref }: { errors: readonly FormError[]; re
 }
 
 function FieldLink({ name, message }: { name: string; message: string }) {
+  const { t } = useTranslation();
   const id = useControlId(name);
+  const [label] = useState(() => labelOf(id));
   return (
     <a
       href={`#${id}`}
@@ -42,7 +45,19 @@ function FieldLink({ name, message }: { name: string; message: string }) {
         control?.focus({ preventScroll: true });
       }}
     >
-      {message}
+      {label ? t("desk:form.fieldError", { label, message }) : message}
     </a>
   );
+}
+
+/** The words that a field is labelled with: many messages only make sense beside them. */
+function labelOf(id: string): string | null {
+  const control = document.getElementById(id);
+  const label =
+    control instanceof HTMLInputElement ||
+    control instanceof HTMLSelectElement ||
+    control instanceof HTMLTextAreaElement
+      ? control.labels?.[0]
+      : null;
+  return label?.textContent ?? null;
 }

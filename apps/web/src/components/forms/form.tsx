@@ -1,4 +1,4 @@
-import { createContext, useContext, useEffect, useId, useRef, useState } from "react";
+import { createContext, useContext, useEffect, useId, useRef } from "react";
 import type { ReactNode } from "react";
 import { FormProvider, useForm } from "react-hook-form";
 import type { DefaultValues, FieldPath, FieldValues } from "react-hook-form";
@@ -30,6 +30,7 @@ export function Form<Input extends FieldValues, Output>({
   defaults,
   submitLabel,
   onSubmit,
+  submitKind = "solid",
   aside,
   children,
 }: {
@@ -40,6 +41,8 @@ export function Form<Input extends FieldValues, Output>({
   submitLabel: string;
   /** @throws ApiProblem to have it shown; anything else is a fault of ours. */
   onSubmit: (values: Output) => Promise<void>;
+  /** Plain where the screen has its one solid act elsewhere. */
+  submitKind?: "solid" | "plain";
   /** Second acts beside the button. */
   aside?: ReactNode;
   children: ReactNode;
@@ -48,7 +51,7 @@ export function Form<Input extends FieldValues, Output>({
   const formId = useId();
   const issueWords = useIssueWords();
   const problemWords = useProblemWords();
-  const [failures, setFailures] = useState(0);
+  const isFocusDue = useRef(false);
   const summary = useRef<HTMLDivElement>(null);
   const sending = useRef(false);
   const form = useForm<Input, unknown, Output>({
@@ -66,8 +69,11 @@ export function Form<Input extends FieldValues, Output>({
     if (typeof schema === "function") void schema().catch(() => undefined);
   }, [schema]);
   useEffect(() => {
-    if (failures > 0) summary.current?.focus();
-  }, [failures]);
+    // The errors are drawn in one of the renders after they were found, so the focus waits for them.
+    if (!isFocusDue.current || !summary.current) return;
+    isFocusDue.current = false;
+    summary.current.focus();
+  });
   useEffect(() => {
     if (!hasErrors) return undefined;
     const before = document.title;
@@ -78,11 +84,13 @@ export function Form<Input extends FieldValues, Output>({
   }, [hasErrors, t]);
 
   const showProblem = (problem: unknown) => {
+    // What is no answer of the server is a fault of ours, and has to be found.
+    if (!(problem instanceof ApiProblem)) console.error(problem);
     const fields = problem instanceof ApiProblem ? problem.fields : [];
     for (const { path, message } of fields)
       form.setError(path as FieldPath<Input>, { type: "server", message });
     form.setError("root.server", { type: "server", message: problemWords(problem) });
-    setFailures((count) => count + 1);
+    isFocusDue.current = true;
   };
   const send = form.handleSubmit(
     async (values) => {
@@ -92,13 +100,17 @@ export function Form<Input extends FieldValues, Output>({
         showProblem(problem);
       }
     },
-    () => setFailures((count) => count + 1),
+    () => {
+      isFocusDue.current = true;
+    },
   );
   const submit = async () => {
     if (sending.current) return;
     sending.current = true;
     try {
       await send();
+    } catch (problem) {
+      showProblem(problem);
     } finally {
       sending.current = false;
     }
@@ -119,7 +131,9 @@ export function Form<Input extends FieldValues, Output>({
           {hasErrors && <ErrorSummary ref={summary} errors={errors} />}
           {children}
           <div className="flex flex-wrap items-center gap-4">
-            <SubmitButton busy={form.formState.isSubmitting}>{submitLabel}</SubmitButton>
+            <SubmitButton kind={submitKind} busy={form.formState.isSubmitting}>
+              {submitLabel}
+            </SubmitButton>
             {aside}
           </div>
         </form>

@@ -1,6 +1,7 @@
 import { set } from "react-hook-form";
 import type { FieldError, FieldErrors, FieldValues, Resolver } from "react-hook-form";
 import type { z } from "zod";
+import { ApiProblem } from "#lib/api-client.ts";
 
 type Schema<Input, Output> = z.ZodType<Output, Input>;
 /** A schema, or a function that fetches it, for forms that are drawn before their schema is here. */
@@ -16,8 +17,8 @@ export function resolveBy<Input extends FieldValues, Output>(
   words: (issue: object) => string,
 ): Resolver<Input, unknown, Output> {
   return async (values) => {
-    const schema = typeof source === "function" ? await source() : source;
-    const parsed = await schema.safeParseAsync(values, { error: words });
+    const schema = typeof source === "function" ? await fetchSchema(source) : source;
+    const parsed = await schema.safeParseAsync(withoutAbsent(values), { error: words });
     if (parsed.success) return { values: parsed.data, errors: {} };
     const first = new Map<string, FieldError>();
     for (const { path, code, message } of parsed.error.issues) {
@@ -30,4 +31,24 @@ export function resolveBy<Input extends FieldValues, Output>(
       set(errors, name, error);
     return { values: {}, errors };
   };
+}
+
+async function fetchSchema<S>(fetchIt: () => Promise<S>): Promise<S> {
+  try {
+    return await fetchIt();
+  } catch {
+    throw new ApiProblem(0, "offline", "No signal.");
+  }
+}
+
+/** Values without the entries that are undefined: a question that was not answered is not there. */
+function withoutAbsent(value: unknown): unknown {
+  if (Array.isArray(value)) return value.map(withoutAbsent);
+  if (typeof value !== "object" || value === null || Object.getPrototypeOf(value) !== Object.prototype)
+    return value;
+  return Object.fromEntries(
+    Object.entries(value).flatMap(([key, entry]) =>
+      entry === undefined ? [] : [[key, withoutAbsent(entry)]],
+    ),
+  );
 }

@@ -6,7 +6,7 @@ export type ActKind = "solid" | "plain" | "words";
 
 const KINDS: Record<ActKind, string> = {
   solid: "rounded border-2 border-ink bg-ink text-ground font-semibold px-5",
-  plain: "rounded border-2 border-ink bg-surface text-ink font-medium px-4",
+  plain: "rounded border-2 border-ink bg-surface text-ink font-medium px-3 desk:px-4",
   words: "text-link underline underline-offset-4 font-semibold px-1",
 };
 

@@ -34,6 +34,8 @@ export function ProblemNote({ problem, onRetry }: { problem: unknown; onRetry?: 
   const { t } = useTranslation();
   const words = useProblemWords();
   const isLost = problem instanceof ApiProblem && problem.status === 404;
+  // A used-up link does not come back by asking again.
+  const isOver = problem instanceof ApiProblem && problem.status === 410;
   return (
     <div role="alert" className="flex flex-col items-start gap-4 p-6">
       {isLost ? <MissingRungDrawing /> : <FailedDrawing />}
@@ -43,7 +45,7 @@ export function ProblemNote({ problem, onRetry }: { problem: unknown; onRetry?: 
           {isLost ? t("desk:states.lostNote") : words(problem)}
         </p>
       </div>
-      {onRetry && !isLost && <ActButton onClick={onRetry}>{t("desk:states.retry")}</ActButton>}
+      {onRetry && !isLost && !isOver && <ActButton onClick={onRetry}>{t("desk:states.retry")}</ActButton>}
     </div>
   );
 }

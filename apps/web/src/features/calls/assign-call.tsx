@@ -29,6 +29,7 @@ export function AssignCall({ call }: { call: CallDetail }) {
         schema={schema}
         defaults={{ personId: call.assignedTo?.id ?? "" }}
         submitLabel={t("desk:call.assign")}
+        submitKind="plain"
         onSubmit={async ({ personId }) => {
           await callApi(assignCall, {
             params: { callId: call.id },

@@ -25,9 +25,11 @@ export function CallFilters({ filter }: { filter: CallFilter }) {
   const [isOpen, setOpen] = useState(false);
   const summary = [
     t(`desk:calls.scopes.${filter.scope}`),
-    filter.status ? t(`desk:callStatus.${filter.status}`) : t("desk:calls.anyStatus"),
+    filter.status && t(`desk:callStatus.${filter.status}`),
     filter.date ?? t("desk:calls.fromToday"),
-  ].join(", ");
+  ]
+    .filter(Boolean)
+    .join(", ");
   return (
     <div className="border-b border-hair">
       {/* On a phone the calls come first: the choices fold into one line that says what is chosen. */}

@@ -23,7 +23,7 @@ export function CallRow({
     <li
       className={`relative border-b px-4 py-3 desk:px-6 ${isNext ? "border-b-2 border-ink bg-surface shadow-[inset_6px_0_0_var(--ink)]" : "border-hair"}`}
     >
-      <div className="grid grid-cols-[4.5rem_1fr_auto] items-start gap-x-3 desk:grid-cols-[7rem_minmax(0,5fr)_minmax(0,6fr)_12rem_auto] desk:gap-x-6">
+      <div className="grid grid-cols-[3.75rem_1fr_auto] items-start gap-x-2 desk:grid-cols-[7rem_minmax(0,5fr)_minmax(0,6fr)_12rem_auto] desk:gap-x-6">
         <p className="numeric text-field font-semibold">
           {formatTime(call.scheduledFor, call.timeZone)}
           <span className="block font-sans text-label font-normal text-quiet desk:text-small">

@@ -1,6 +1,13 @@
-import type { AnswerOf, Call, CallDetail, CallStatus, listCalls as ListCalls } from "@emberladder/contract";
+import type {
+  AnswerOf,
+  Call,
+  CallDetail,
+  CallStatus,
+  listCalls as ListCalls,
+  UnitDetail,
+} from "@emberladder/contract";
 import { ApiProblem, callApi } from "#lib/api-client.ts";
-import { listCalls, readCall } from "#lib/shell-routes.ts";
+import { listCalls, readCall, readUnit } from "#lib/shell-routes.ts";
 import { addDays } from "#lib/site-time.ts";
 
 /** States of a call, in the order of its life. The contract has them beside its schemas, which come later. */
@@ -68,7 +75,7 @@ export async function fetchCalls(filter: CallFilter, today: string, signal: Abor
 const KEPT_CALLS = 20;
 
 /**
- * Keeps the calls of a list whole on this phone, so that each opens without a signal. Best effort: what cannot be
+ * Keeps the calls of a list and their units whole on this phone, so that each opens without a signal. Best effort: what cannot be
  * fetched now is fetched when it is opened.
  */
 export async function keepCalls(calls: readonly Call[]): Promise<void> {
@@ -76,11 +83,14 @@ export async function keepCalls(calls: readonly Call[]): Promise<void> {
   const wanted = calls
     .filter((call) => call.status === "open" || call.status === "under-way")
     .slice(0, KEPT_CALLS);
+  const keep = async (key: string, value: CallDetail | UnitDetail) => {
+    await writeDocument(key, value);
+    await writeDocument(`at:${key}`, Date.now());
+  };
   for (const call of wanted) {
     try {
-      const detail: CallDetail = await callApi(readCall, { params: { callId: call.id } });
-      await writeDocument(`call:${call.id}`, detail);
-      await writeDocument(`at:call:${call.id}`, Date.now());
+      await keep(`call:${call.id}`, await callApi(readCall, { params: { callId: call.id } }));
+      await keep(`unit:${call.unit.id}`, await callApi(readUnit, { params: { unitId: call.unit.id } }));
     } catch (problem) {
       if (problem instanceof ApiProblem && problem.code === "offline") return;
     }

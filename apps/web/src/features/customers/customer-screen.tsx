@@ -108,8 +108,8 @@ function Reach({ customer }: { customer: CustomerDetail }) {
       ) : (
         <Facts
           rows={[
-            { name: t("desk:customer.email"), value: email ?? t("desk:customers.noEmail") },
-            { name: t("desk:customer.phone"), value: phone ?? t("desk:form.notGiven") },
+            { name: t("desk:signIn.email"), value: email ?? t("desk:customers.noEmail") },
+            { name: t("desk:customer.phoneGiven"), value: phone ?? t("desk:form.notGiven") },
           ]}
         />
       )}

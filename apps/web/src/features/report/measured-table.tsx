@@ -30,7 +30,7 @@ export function MeasuredTable({ rows }: { rows: ReportContent["measured"] }) {
                 {row.what}
               </th>
               <td className="py-2 pr-3">
-                <span className="numeric font-semibold">{row.reading}</span>
+                <span className="numeric font-semibold whitespace-nowrap">{row.reading}</span>
                 <span className="block text-quiet">{row.verdict}</span>
               </td>
               <td className="py-2">{row.expected}</td>

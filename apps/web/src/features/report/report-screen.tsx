@@ -43,7 +43,7 @@ function ReportPage({ report, pdfAddress }: { report: Report; pdfAddress: string
       <header className="flex items-center justify-between gap-3 border-b-3 border-ink bg-surface px-4 py-3">
         <p className="text-field font-semibold">{report.companyName}</p>
         {report.isDemo && (
-          <span className="rounded border-2 border-ink px-2 text-label font-semibold">
+          <span className="shrink-0 rounded border-2 border-ink px-2 text-label font-semibold">
             {t("desk:report.demo")}
           </span>
         )}

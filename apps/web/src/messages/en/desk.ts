@@ -127,6 +127,7 @@ export const desk = {
     email: "E-mail, if any",
     emailHint: "The report goes there.",
     phone: "Phone, if any",
+    phoneGiven: "Phone",
     add: "Add the customer",
     reach: "How to reach them",
     noSites: "No site yet. A unit needs one.",
@@ -256,7 +257,7 @@ export const desk = {
   },
   report: {
     title: "Report on your furnace",
-    demo: "Demo: all invented",
+    demo: "Demo",
     claims: {
       safe: "Your furnace heats again and is safe to use.",
       "shut-off": "Your furnace is shut off. Do not turn it on.",

@@ -5,6 +5,7 @@
 export const shell = {
   form: {
     errorTitle: "Error: {{title}}",
+    fieldError: "{{label}}: {{message}}",
     summary: "Mend this, then send again.",
     sending: "Sending",
     keep: "Keep it as it is",
