@@ -1,8 +1,7 @@
-import { verifyStoredRecord } from "@emberladder/api/src/modules/diagnoses/verify-stored-record.ts";
 import { auditLog, diagnoses, eventFlags, events } from "@emberladder/db";
 import type { Verdicts } from "@emberladder/contract";
 import { MAX_BATCH_EVENTS } from "@emberladder/contract";
-import { canonicalText, noteHash, seal } from "@emberladder/diagnosis";
+import { canonicalText, noteHash, seal, verifyRecord } from "@emberladder/diagnosis";
 import type { Envelope, StoredEvent } from "@emberladder/diagnosis";
 import { asc, eq } from "drizzle-orm";
 import { v7 as uuidv7 } from "uuid";
@@ -266,7 +265,7 @@ describe("a batch of events", () => {
       verification: { intact: boolean };
     }>();
     expect(detail.verification.intact).toBe(true);
-    expect(verifyStoredRecord(detail.events)).toEqual([]);
+    expect(verifyRecord(detail.events)).toEqual([]);
   });
 
   it("marks a trainee's record for a supervisor to look at", async () => {
@@ -459,7 +458,7 @@ describe("pulling", () => {
         more: boolean;
       }>();
     const all = await pull(0);
-    expect(verifyStoredRecord(all.events)).toEqual([]);
+    expect(verifyRecord(all.events)).toEqual([]);
     expect(all.events).toMatchObject(list);
     expect(ids((await pull(3)).events)).toEqual([list[3]?.id]);
     expect((await pull(4)).events).toEqual([]);
@@ -472,13 +471,13 @@ describe("pulling", () => {
       await technician.call("pullEvents", { body: { heads: { [record.diagnosisId]: 0 } } })
     ).json<{ events: StoredEvent[] }>();
     const [one, two, three, four] = list as [StoredEvent, StoredEvent, StoredEvent, StoredEvent];
-    expect(verifyStoredRecord([one, { ...two, occurredAt: two.occurredAt + 1 }, three, four])[0]).toEqual({
+    expect(verifyRecord([one, { ...two, occurredAt: two.occurredAt + 1 }, three, four])[0]).toEqual({
       serverSeq: 2,
       reason: "hash",
     });
-    expect(verifyStoredRecord([one, three, four])[0]?.serverSeq).toBe(3);
-    expect(verifyStoredRecord([one, three, two, four]).map(({ serverSeq }) => serverSeq)).toContain(3);
-    expect(verifyStoredRecord([one, { ...two, actorId: uuidv7() }, three, four])[0]).toEqual({
+    expect(verifyRecord([one, three, four])[0]?.serverSeq).toBe(3);
+    expect(verifyRecord([one, three, two, four]).map(({ serverSeq }) => serverSeq)).toContain(3);
+    expect(verifyRecord([one, { ...two, actorId: uuidv7() }, three, four])[0]).toEqual({
       serverSeq: 2,
       reason: "server-chain",
     });

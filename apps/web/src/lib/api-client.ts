@@ -78,14 +78,14 @@ function problemOf(status: number, body: unknown): ApiProblem {
     code?: string;
     title?: string;
     detail?: string;
-    errors?: { path: string; message: string }[];
+    errors?: { pointer: string; detail: string }[];
   };
   return new ApiProblem(
     status,
     problem.code ?? "server-fault",
     problem.title ?? "",
     problem.detail,
-    problem.errors ?? [],
+    (problem.errors ?? []).map(({ pointer, detail }) => ({ path: pathOfPointer(pointer), message: detail })),
   );
 }
 

@@ -12,7 +12,7 @@ import { listEventsOf, listNotesOf, readStoredEvent } from "#modules/sync/reposi
 import { eraseNoteText, findNote, listNames } from "./notes/repository.ts";
 import { presentSummary } from "./present-diagnosis.ts";
 import { presentNotes } from "./present-notes.ts";
-import { endWaiting, listFlagsOf } from "./repository.ts";
+import { endWaiting, findHead, listFlagsOf } from "./repository.ts";
 import { verifyStoredRecord } from "./verify-stored-record.ts";
 import { findSummary, listSummaries } from "./summaries/repository.ts";
 
@@ -47,13 +47,14 @@ export async function readDiagnosisDetail(
 ): Promise<DiagnosisDetail> {
   const { companyId } = actor;
   const summary = found(await findSummary(database, companyId, diagnosisId));
-  const [eventRows, noteRows, flagRows] = await Promise.all([
+  const [head, eventRows, noteRows, flagRows] = await Promise.all([
+    findHead(database, companyId, diagnosisId),
     listEventsOf(database, diagnosisId),
     listNotesOf(database, companyId, [diagnosisId]),
     listFlagsOf(database, companyId, diagnosisId),
   ]);
   const events = eventRows.map(readStoredEvent);
-  const breaks = verifyStoredRecord(events);
+  const breaks = verifyStoredRecord(eventRows, found(head));
   const names = await listNames(
     database,
     events.map(({ actorId }) => actorId),
@@ -64,8 +65,7 @@ export async function readDiagnosisDetail(
     notes: await presentNotes(database, noteRows),
     flagList: flagRows.map(presentFlag),
     people: [...names].map(([id, name]) => ({ id, name })),
-    // A record cut short at its end still links up, but no longer reaches its head.
-    verification: { intact: breaks.length === 0 && events.length === summary.serverSeq, breaks },
+    verification: { intact: breaks.length === 0, breaks },
   };
 }
 

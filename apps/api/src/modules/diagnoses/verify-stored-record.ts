@@ -1,17 +1,47 @@
-import { envelopeSchema, hashMatches, verifyRecord } from "@emberladder/diagnosis";
+import { sha256Hex, verifyRecord } from "@emberladder/diagnosis";
 import type { ChainBreak, StoredEvent } from "@emberladder/diagnosis";
+import type { EventRow } from "#modules/sync/repository.ts";
+import { readStoredEvent } from "#modules/sync/repository.ts";
 
 /**
- * Verifies a record as it was stored. The hash of an event covers its envelope alone, so each is judged
- * without what the server added; order and both chains are judged with it.
+ * Verifies a record as it lies in the database: the events by their own hashes and both chains, the text of
+ * each against its hash and against the columns that lists read, and the end of the record against the head
+ * of the diagnosis, so that an event cut off at the end is missed too.
+ *
+ * @returns the breaks in order of place; none when the record is as it was received
  */
-export function verifyStoredRecord(events: readonly StoredEvent[]): ChainBreak[] {
-  const chain = verifyRecord(events).filter(({ reason }) => reason !== "hash");
-  const hashes = events
-    .filter(({ serverSeq: _s, companyId: _c, actorId: _a, receivedAt: _r, chainHash: _h, ...envelope }) => {
-      const parsed = envelopeSchema.safeParse(envelope);
-      return !parsed.success || !hashMatches(parsed.data);
-    })
-    .map(({ serverSeq }): ChainBreak => ({ serverSeq, reason: "hash" }));
-  return [...hashes, ...chain].toSorted((a, b) => a.serverSeq - b.serverSeq);
+export function verifyStoredRecord(
+  rows: readonly EventRow[],
+  head: { serverSeq: number; chainHash: string },
+): ChainBreak[] {
+  const events = rows.map(readStoredEvent);
+  const breaks = verifyRecord(events);
+  const isKnown = (wanted: ChainBreak) =>
+    breaks.some(({ serverSeq, reason }) => serverSeq === wanted.serverSeq && reason === wanted.reason);
+  const report = (found: ChainBreak) => {
+    if (!isKnown(found)) breaks.push(found);
+  };
+  rows.forEach((row, index) => {
+    const event = events[index];
+    if (!event || sha256Hex(row.canonicalText) !== row.hash || !isSame(row, event))
+      report({ serverSeq: row.serverSeq, reason: "hash" });
+  });
+  const last = rows.at(-1);
+  if (last?.serverSeq !== head.serverSeq)
+    report({ serverSeq: (last?.serverSeq ?? 0) + 1, reason: "server-order" });
+  else if (last.chainHash !== head.chainHash) report({ serverSeq: last.serverSeq, reason: "server-chain" });
+  return breaks.toSorted((a, b) => a.serverSeq - b.serverSeq);
+}
+
+/** Whether the columns beside a text say the same as the text. */
+function isSame(row: EventRow, event: StoredEvent): boolean {
+  return (
+    row.id === event.id &&
+    row.diagnosisId === event.diagnosisId &&
+    row.deviceId === event.deviceId &&
+    row.deviceSeq === event.deviceSeq &&
+    row.type === event.type &&
+    row.schemaVersion === event.schemaVersion &&
+    row.prevHash === event.prevHash
+  );
 }

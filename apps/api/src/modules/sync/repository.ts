@@ -1,8 +1,11 @@
 import { calls, devices, diagnoses, eventFlags, events, noteTexts, units } from "@emberladder/db";
 import type { Queryable } from "@emberladder/db";
 import type { UnitProfile } from "@emberladder/furnace";
-import type { StoredEvent } from "@emberladder/diagnosis";
+import { envelopeSchema } from "@emberladder/diagnosis";
+import type { StoredEvent, UnhashedEnvelope } from "@emberladder/diagnosis";
 import { and, asc, eq, gt, inArray, isNull, ne, or, sql } from "drizzle-orm";
+
+const storedTextSchema = envelopeSchema.omit({ hash: true });
 
 export type DiagnosisRow = typeof diagnoses.$inferSelect;
 export type EventRow = typeof events.$inferSelect;
@@ -144,15 +147,42 @@ export async function listEventsAfter(
 
 /** An event as it was received: from the text that was hashed, never from anything re-written. */
 export function readStoredEvent(row: EventRow): StoredEvent {
-  const envelope = JSON.parse(row.canonicalText) as Omit<StoredEvent, "hash">;
   return {
-    ...envelope,
+    ...readEnvelope(row),
     hash: row.hash,
     serverSeq: row.serverSeq,
     companyId: row.companyId,
     actorId: row.actorId,
     receivedAt: row.receivedAt.getTime(),
     chainHash: row.chainHash,
+  };
+}
+
+/**
+ * The envelope in a stored text. A text that somebody altered so far that it is no envelope any more is shown
+ * by what its columns still tell, so that the rest of the record stays readable; its hash then fits nothing.
+ */
+function readEnvelope(row: EventRow): UnhashedEnvelope {
+  try {
+    const parsed = storedTextSchema.safeParse(JSON.parse(row.canonicalText));
+    if (parsed.success) return parsed.data;
+  } catch {
+    // Not JSON any more.
+  }
+  return {
+    id: row.id,
+    diagnosisId: row.diagnosisId,
+    deviceId: row.deviceId,
+    deviceSeq: row.deviceSeq,
+    type: row.type,
+    schemaVersion: row.schemaVersion,
+    body: {},
+    occurredAt: row.receivedAt.getTime(),
+    tzOffsetMin: 0,
+    monotonicMs: 0,
+    serverOffsetMs: null,
+    appBuild: "",
+    prevHash: row.prevHash,
   };
 }
 
