@@ -18,6 +18,7 @@ export default defineConfig({
     baseURL: process.env["EMBERLADDER_ORIGIN"] ?? "http://127.0.0.1:4310",
     viewport: { width: 360, height: 640 },
     hasTouch: true,
+    actionTimeout: 15_000,
     trace: "retain-on-failure",
     launchOptions: {
       executablePath: process.env["CHROMIUM"] ?? "/usr/bin/chromium",

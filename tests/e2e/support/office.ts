@@ -31,13 +31,19 @@ export async function openCall(
     const { request } = context;
     const office = person(given.office);
     await post(request, "/api/auth/sign-in", { email: office.email, password: office.password });
-    const people = (await (await request.get("/api/people")).json()) as { items: { id: string; email: string }[] };
+    const people = (await (await request.get("/api/people")).json()) as {
+      items: { id: string; email: string }[];
+    };
     const assignedTo = people.items.find(({ email }) => email === person(given.technician).email)?.id ?? null;
     const customer = await post<{ sites: { id: string }[] }>(request, "/api/customers", {
       ...given.customer,
       site: { address: given.address, town: "Harrow Falls", altitudeFt: 4300 },
     });
-    const unit = await post<{ id: string }>(request, "/api/units", { siteId: customer.sites[0]?.id, name: given.unitName, profile: given.profile });
+    const unit = await post<{ id: string }>(request, "/api/units", {
+      siteId: customer.sites[0]?.id,
+      name: given.unitName,
+      profile: given.profile,
+    });
     const call = await post<{ id: string }>(request, "/api/calls", {
       unitId: unit.id,
       complaint: given.complaint,
@@ -53,7 +59,11 @@ export async function openCall(
 let count = 0;
 
 /** A call like a reference call, with a customer of its own, so that its mail can be told from others. */
-export async function openReferenceCall(browser: Browser, reference: ReferenceCall, change: (profile: UnitProfile) => UnitProfile = (profile) => profile) {
+export async function openReferenceCall(
+  browser: Browser,
+  reference: ReferenceCall,
+  change: (profile: UnitProfile) => UnitProfile = (profile) => profile,
+) {
   count += 1;
   const [firstName = "", lastName = ""] = reference.job.customer.name.split(" ");
   return openCall(browser, {
@@ -69,5 +79,8 @@ export async function openReferenceCall(browser: Browser, reference: ReferenceCa
 
 /** A unit's last flue CO, two months old: a repair of the flame need not take it again. */
 export function withFreshFlueCo(profile: UnitProfile): UnitProfile {
-  return { ...profile, lastFlueCo: { date: new Date(Date.now() - 60 * 86_400_000).toISOString().slice(0, 10), airFreePpm: 29 } };
+  return {
+    ...profile,
+    lastFlueCo: { date: new Date(Date.now() - 60 * 86_400_000).toISOString().slice(0, 10), airFreePpm: 29 },
+  };
 }

@@ -27,7 +27,9 @@ export function person(start: string): Account {
 /** The present two-step code of a person. */
 export async function codeOf(account: Account): Promise<string> {
   const secret = new URL(account.totpSecretUri ?? "").searchParams.get("secret") ?? "";
-  return new TOTPController({ digits: 6, period: new TimeSpan(30, "s") }).generate(base32.decode(secret, { strict: false }));
+  return new TOTPController({ digits: 6, period: new TimeSpan(30, "s") }).generate(
+    base32.decode(secret, { strict: false }),
+  );
 }
 
 /** Signs a person in by the form, as they would on a phone. */
@@ -38,8 +40,14 @@ export async function signIn(page: Page, start: string): Promise<void> {
   await page.getByLabel(/^password/i).fill(account.password);
   await page.getByRole("button", { name: /sign in/i }).click();
   if (account.totpSecretUri) {
-    await page.getByLabel(/code/i).first().fill(await codeOf(account));
-    await page.getByRole("button", { name: /go on|confirm|check|enter/i }).first().click();
+    await page
+      .getByLabel(/code/i)
+      .first()
+      .fill(await codeOf(account));
+    await page
+      .getByRole("button", { name: /go on|confirm|check|enter/i })
+      .first()
+      .click();
   }
   await expect(page).toHaveURL(/\/calls/);
 }

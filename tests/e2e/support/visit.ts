@@ -12,7 +12,10 @@ export class Hands {
   /** Taps a button by its words. */
   async tap(name: string | RegExp, options: { exact?: boolean } = {}): Promise<void> {
     this.taps += 1;
-    await this.page.getByRole("button", { name, exact: options.exact ?? false }).first().click();
+    await this.page
+      .getByRole("button", { name, exact: options.exact ?? false })
+      .first()
+      .click();
   }
 
   /** Types digits into the field with the focus, or the first one. */

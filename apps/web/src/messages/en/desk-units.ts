@@ -1,6 +1,6 @@
 /** Words of a unit's own screens and form. Names of parts and codes are the trade's words. */
 export const deskUnits = {
-  siUnits: { Pa: "Pa", mm: "mm", C: "\u00B0C", Lps: "L/s", m3h: "m\u00B3/h" },
+  siUnits: { Pa: "Pa", mm: "mm", C: "\u00B0C", Lps: "L/s", m3h: "m\u00B3/h", kW: "kW" },
   plateUnits: { btuh: "Btu/h", VA: "VA", btuPerFt3: "Btu/cu ft", ft: "ft" },
   unit: {
     name: "Name of the unit",

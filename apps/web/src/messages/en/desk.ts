@@ -71,6 +71,7 @@ export const desk = {
     start: "Start at the door",
     goOn: "Go on with the diagnosis",
     assignedTo: "{{name}} has it.",
+    nobody: "Nobody has it yet.",
     office: "At the desk",
     who: "Who goes",
     assign: "Assign the call",

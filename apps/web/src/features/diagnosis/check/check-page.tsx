@@ -113,11 +113,23 @@ export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | 
       />,
     );
   }
-  if (definition.reading === "in-out" && way !== "button" && way !== "ohms")
-    return <InOutAnswer key={way} task={task} frame={frame} />;
-  if (definition.reading === "number" || definition.reading === "in-out")
-    return <NumberAnswer key={way} task={task} frame={frame} />;
-  return <LookAnswer key={way} task={task} frame={frame} />;
+  const Answer = ANSWERS[panelOf(definition.reading, way)];
+  return <Answer key={way} task={task} frame={frame} />;
+}
+
+type Panel = "look" | "number" | "in-out";
+
+const ANSWERS: Record<Panel, (props: { task: CheckTask; frame: Frame }) => React.ReactNode> = {
+  look: LookAnswer,
+  number: NumberAnswer,
+  "in-out": InOutAnswer,
+};
+
+/** How an answer is given: the check's own kind, unless the way of taking it says by eye or in ohms. */
+function panelOf(reading: Panel, way: string | undefined): Panel {
+  if (way === "look") return "look";
+  if (way === "ohms" || way === "fuse-out-ohms") return "number";
+  return reading;
 }
 
 export type Frame = (content: React.ReactNode, pinned?: React.ReactNode) => React.ReactNode;

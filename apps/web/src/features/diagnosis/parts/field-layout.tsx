@@ -8,6 +8,7 @@ import { LadderStrip } from "#components/ladder/ladder-strip.tsx";
 import { paths } from "#lib/paths.ts";
 import { FieldDock } from "./field-dock.tsx";
 import { FieldHeader } from "./field-header.tsx";
+import { StopBanner } from "./stop-banner.tsx";
 
 /**
  * The frame of every field screen: header, the ladder along one side, the question, the pinned act, the dock.
@@ -46,6 +47,7 @@ export function FieldLayout({
   return (
     <div className="flex h-dvh flex-col bg-ground">
       <FieldHeader title={title} subtitle={subtitle} />
+      {!stopped && <StopBanner diagnosisId={diagnosisId} state={state} />}
       {flush}
       <div className="flex min-h-0 grow">
         {strip && (

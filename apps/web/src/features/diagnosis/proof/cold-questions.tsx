@@ -6,9 +6,10 @@ import { PlainButton } from "#components/ui/button.tsx";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 
 /** A unit left without heat: the people in it, safe heat, what must not be lit, the freeze, the CO alarm. */
-export function ColdQuestions() {
+export function ColdQuestions({ stays }: { stays: boolean }) {
   const { t } = useTranslation();
-  const { recordAndGoOn } = useDiagnosis();
+  const { record, recordAndGoOn } = useDiagnosis();
+  const keep = stays ? record : recordAndGoOn;
   const [answers, setAnswers] = useState<Record<string, boolean>>({});
   const answered = COLD_ITEMS.filter((item) => answers[item] !== undefined).length;
   return (
@@ -39,7 +40,7 @@ export function ColdQuestions() {
       <PlainButton
         disabled={answered < COLD_ITEMS.length}
         onClick={() =>
-          void recordAndGoOn([
+          void keep([
             command("proof.recorded", {
               closing: "close-cold",
               value: answered,

@@ -10,13 +10,14 @@ import { ProofNumber } from "./proof-number.tsx";
 import { TimedProof } from "./timed-proof.tsx";
 
 /** The act that records one closing check: a tap whose label is what it stores, or a number. */
-export function ProofAct({ item }: { item: ProofItem }) {
+export function ProofAct({ item, stays }: { item: ProofItem; stays: boolean }) {
   const { t } = useTranslation();
   const { state, record, recordAndGoOn } = useDiagnosis();
+  const keep = stays ? record : recordAndGoOn;
   const [typing, setTyping] = useState(false);
   const { id } = item;
   const label = (key: string, values?: Record<string, unknown>) => t(`proof.acts.${key}`, values);
-  const tap = (commands: Command[]) => void recordAndGoOn(commands);
+  const tap = (commands: Command[]) => void keep(commands);
   const runs = command("unit-state.set", { power: "on", calling: true });
 
   switch (id) {
@@ -79,7 +80,7 @@ export function ProofAct({ item }: { item: ProofItem }) {
       ) : null;
     case "close-room-co":
       return typing ? (
-        <ProofNumber item={item} />
+        <ProofNumber item={item} stays={stays} />
       ) : (
         <div className="grid grid-cols-[1fr_8rem] gap-2">
           <AnswerButton
@@ -136,11 +137,11 @@ export function ProofAct({ item }: { item: ProofItem }) {
         </AnswerButton>
       );
     case "close-draft-opens":
-      return <TimedProof item={item} seconds={60} />;
+      return <TimedProof item={item} seconds={60} stays={stays} />;
     case "close-cold":
-      return <ColdQuestions />;
+      return <ColdQuestions stays={stays} />;
     default:
-      return <ProofNumber item={item} />;
+      return <ProofNumber item={item} stays={stays} />;
   }
 
   function coBefore(): number {

@@ -15,9 +15,10 @@ const ALWAYS_ASKED: Record<string, string[]> = {
 };
 
 /** A closing check that is a number: typed here, with what has to go with it, recorded by a button that names it. */
-export function ProofNumber({ item }: { item: ProofItem }) {
+export function ProofNumber({ item, stays }: { item: ProofItem; stays: boolean }) {
   const { t } = useTranslation();
-  const { profile, recordAndGoOn } = useDiagnosis();
+  const { profile, record, recordAndGoOn } = useDiagnosis();
+  const keep = stays ? record : recordAndGoOn;
   const definition = getClosingCheck(item.id);
   const twoStage = profile.codes.staging === "2S";
   const wanted = new Set([
@@ -38,7 +39,7 @@ export function ProofNumber({ item }: { item: ProofItem }) {
   const value = parsed.ok && parsed.value !== "OL" ? parsed.value : undefined;
   const unit = t(`trade:units.${definition.unit}`);
 
-  const record = () => {
+  const handleRecord = () => {
     if (value === undefined) {
       setError(t("reading.enterNumber"));
       return;
@@ -54,7 +55,7 @@ export function ProofNumber({ item }: { item: ProofItem }) {
       if (number.ok && number.value !== "OL") extra[field.id] = number.value;
     }
     setError(null);
-    void recordAndGoOn([
+    void keep([
       command("proof.recorded", {
         closing: item.id,
         value,
@@ -77,7 +78,7 @@ export function ProofNumber({ item }: { item: ProofItem }) {
         unit={unit}
         text={text}
         onChange={setText}
-        onSubmit={record}
+        onSubmit={handleRecord}
       />
       {extras.map((field) =>
         field.unit === "yes-no" ? (
@@ -101,7 +102,7 @@ export function ProofNumber({ item }: { item: ProofItem }) {
           />
         ),
       )}
-      <PlainButton onClick={record}>
+      <PlainButton onClick={handleRecord}>
         {value === undefined ? t("reading.recordEmpty") : t("reading.record", { value: text.trim(), unit })}
       </PlainButton>
     </div>

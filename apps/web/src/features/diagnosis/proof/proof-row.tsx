@@ -4,8 +4,8 @@ import { OutcomeMark } from "#components/ui/outcome-mark.tsx";
 import { formatNumber } from "#lib/format-number.ts";
 import { ProofAct } from "./proof-act.tsx";
 
-/** One closing check: what is wanted in words, the act that records it, and the value once it is read. */
-export function ProofRow({ item }: { item: ProofItem }) {
+/** One closing check: what is wanted in words, the act that records it, and the value once it is read. `stays` keeps the page. */
+export function ProofRow({ item, stays = false }: { item: ProofItem; stays?: boolean }) {
   const { t } = useTranslation();
   const { reading, verdict } = item;
   const wanted = t(`trade:closing.${item.id}.right`);
@@ -30,7 +30,7 @@ export function ProofRow({ item }: { item: ProofItem }) {
         </span>
         <span className="numeric shrink-0 font-semibold">{value}</span>
       </p>
-      {!verdict.pass && <ProofAct item={item} />}
+      {!verdict.pass && <ProofAct item={item} stays={stays} />}
     </div>
   );
 }

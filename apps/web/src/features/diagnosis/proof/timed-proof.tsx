@@ -8,9 +8,10 @@ import { useDiagnosis } from "../diagnosis-context.tsx";
 import { StepTimer } from "../parts/step-timer.tsx";
 
 /** The draft switch proven to open: inducer unplugged, gas shut, a call that reaches nothing for a minute. */
-export function TimedProof({ item, seconds }: { item: ProofItem; seconds: number }) {
+export function TimedProof({ item, seconds, stays }: { item: ProofItem; seconds: number; stays: boolean }) {
   const { t } = useTranslation();
-  const { recordAndGoOn } = useDiagnosis();
+  const { record, recordAndGoOn } = useDiagnosis();
+  const keep = stays ? record : recordAndGoOn;
   const [since, setSince] = useState<number | null>(null);
   const now = useNow(since !== null);
   const waited = since === null ? 0 : (now - since) / 1000;
@@ -26,7 +27,7 @@ export function TimedProof({ item, seconds }: { item: ProofItem; seconds: number
       <PlainButton
         disabled={waited < seconds}
         onClick={() =>
-          void recordAndGoOn([
+          void keep([
             command("proof.recorded", {
               closing: item.id,
               value: Math.floor(waited),

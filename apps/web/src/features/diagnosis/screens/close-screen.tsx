@@ -57,7 +57,7 @@ export function CloseScreen() {
       {outcome && (
         <section className="flex flex-col gap-3 border-t-2 border-ink pt-3" aria-label={t("close.needs")}>
           {items.map((item) => (
-            <ProofRow key={item.id} item={item} />
+            <ProofRow key={item.id} item={item} stays />
           ))}
           {outcome === "shut-off" && (
             <label className="flex flex-col gap-1 text-field font-semibold">

@@ -4,9 +4,11 @@ import { getRepair, REPAIR_IDS } from "@emberladder/furnace";
 import type { PartId, RepairId } from "@emberladder/furnace";
 import { useState } from "react";
 import { useTranslation } from "react-i18next";
+import { Link } from "react-router-dom";
 import { AnswerButton } from "#components/ui/answer-button.tsx";
 import { LinkButton, PlainButton } from "#components/ui/button.tsx";
 import { HazardLine } from "#components/ui/hazard-line.tsx";
+import { paths } from "#lib/paths.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { FieldLayout } from "../parts/field-layout.tsx";
 import { RefusalNote } from "../parts/refusal-note.tsx";
@@ -86,6 +88,12 @@ export function RepairScreen() {
               </AnswerButton>
             );
           })}
+          <Link
+            to={paths.diagnosis.close(diagnosisId)}
+            className="flex min-h-12 items-center text-field font-semibold"
+          >
+            {t("repair.notNow")}
+          </Link>
           {!all && <PlainButton onClick={() => setAll(true)}>{t("repair.other")}</PlainButton>}
         </>
       )}
