@@ -80,7 +80,7 @@ async function appendCarefully(
   const row = existing ?? (await readNewDiagnosis(tx, context, first));
   if (row === undefined) return refuseAll(first, "not-opened");
   if (row.companyId !== context.actor.companyId) return refuseAll(first, "unknown-diagnosis");
-  const head = await readHead(tx, row);
+  const head = await readHead(tx, row, readOpening(first.read)?.tree ?? null);
   const known = await findKnownEvents(
     tx,
     items.map(({ envelope }) => envelope),

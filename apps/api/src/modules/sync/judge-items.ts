@@ -66,7 +66,7 @@ export function judgeItems(
       actorId: actor.personId,
       receivedAt: now.getTime(),
     });
-    const before = { state, devices: new Set(lastOfDevice.keys()) };
+    const before = { state, devices: new Set(lastOfDevice.keys()), tree: head.tree };
     for (const flag of flagsOf(envelope, item.read, before, actor.role))
       judged.flags.push({ ...flag, eventId: envelope.id });
     state = evolveState(state, envelope, { serverSeq, actorId: actor.personId });
@@ -76,7 +76,7 @@ export function judgeItems(
     judged.accepted.push({ id: envelope.id, serverSeq });
     judged.rows.push(rowOf(item, { serverSeq, chainHash, actor, now }));
   }
-  judged.head = { serverSeq, chainHash, state, lastOfDevice };
+  judged.head = { serverSeq, chainHash, state, lastOfDevice, tree: head.tree };
   return judged;
 }
 

@@ -1,7 +1,10 @@
 import { GENESIS_HASH } from "@emberladder/diagnosis";
 import type { Queryable } from "@emberladder/db";
+import type { TreeDocument } from "@emberladder/trees";
 import { evolveState, initialState } from "./judge.ts";
 import type { DiagnosisState } from "./judge.ts";
+import { readPinnedTree } from "./pinned-tree.ts";
+import type { TreePin } from "./pinned-tree.ts";
 import { listEventsOf, readStoredEvent } from "./repository.ts";
 import type { DiagnosisRow } from "./repository.ts";
 
@@ -11,6 +14,8 @@ export interface RecordHead {
   chainHash: string;
   state: DiagnosisState;
   lastOfDevice: ReadonlyMap<string, { hash: string; deviceSeq: number }>;
+  /** The document of the tree that the diagnosis pinned; null where there is none. */
+  tree: TreeDocument | null;
 }
 
 const emptyHead: RecordHead = {
@@ -18,6 +23,7 @@ const emptyHead: RecordHead = {
   chainHash: GENESIS_HASH,
   state: initialState,
   lastOfDevice: new Map(),
+  tree: null,
 };
 
 /** A head with the row it belongs to, as this process committed them last. */
@@ -46,9 +52,12 @@ export function keepHead(diagnosisId: string, entry: KeptHead): void {
   if (oldest !== undefined) kept.delete(oldest);
 }
 
-/** The record of a diagnosis at the head of its locked row: from memory where that is it, else folded again. */
-export async function readHead(db: Queryable, row: DiagnosisRow): Promise<RecordHead> {
-  if (row.serverSeq === 0) return emptyHead;
+/**
+ * The record of a diagnosis at the head of its locked row: from memory where that is it, else folded again.
+ * @param pin the tree that an opening pins, where the row is a new one
+ */
+export async function readHead(db: Queryable, row: DiagnosisRow, pin: TreePin): Promise<RecordHead> {
+  if (row.serverSeq === 0) return { ...emptyHead, tree: await readPinnedTree(db, row.companyId, pin) };
   const known = kept.get(row.id)?.head;
   if (known && known.serverSeq === row.serverSeq && known.chainHash === row.chainHash) return known;
   let state = initialState;
@@ -57,5 +66,6 @@ export async function readHead(db: Queryable, row: DiagnosisRow): Promise<Record
     state = evolveState(state, readStoredEvent(event), event);
     lastOfDevice.set(event.deviceId, { hash: event.hash, deviceSeq: event.deviceSeq });
   }
-  return { serverSeq: row.serverSeq, chainHash: row.chainHash, state, lastOfDevice };
+  const tree = await readPinnedTree(db, row.companyId, state.opened?.tree ?? null);
+  return { serverSeq: row.serverSeq, chainHash: row.chainHash, state, lastOfDevice, tree };
 }
