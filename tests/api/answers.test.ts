@@ -71,6 +71,7 @@ const ask = async (name: (typeof ROUTE_NAMES)[number]) => {
   });
 };
 
+// SEC-14 and SEC-20: headers of every answer, errors included.
 describe("every answer", () => {
   for (const name of ROUTE_NAMES)
     it(`of ${name} carries the headers, and the contract's status or a problem document`, async () => {
@@ -111,6 +112,7 @@ describe("every answer", () => {
   });
 });
 
+// SEC-17: what a fault tells.
 describe("a fault inside a route", () => {
   const secret = "SELECT password_hash FROM people; at /srv/secret.ts:1:1";
   for (const name of ROUTE_NAMES)
@@ -129,6 +131,7 @@ describe("a fault inside a route", () => {
     });
 });
 
+// SEC-18: what is logged, and what never is.
 describe("the log", () => {
   it("holds no password, cookie, code, token or address of a link, and one line for each request", async () => {
     const before = server.logged.length;

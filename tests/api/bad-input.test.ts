@@ -28,6 +28,7 @@ const addressFor = (name: (typeof ROUTE_NAMES)[number]) => {
   return routeContracts[name].path.replaceAll(/\{(\w+)\}/g, (_all, key: string) => params[key] ?? "");
 };
 
+// SEC-11: what is not in the contract is refused.
 describe("a body", () => {
   for (const name of withBody) {
     it(`of ${name} that is no JSON, an array, null or nothing is refused`, async () => {
@@ -112,6 +113,7 @@ describe("a body", () => {
   });
 });
 
+// SEC-11 and SEC-13: queries.
 describe("a query", () => {
   for (const name of withQuery)
     it(`of ${name} with a name given twice, an unknown one or a silly value is refused`, async () => {

@@ -60,6 +60,7 @@ afterAll(async () => {
   await wire.cut();
 });
 
+// SEC-17: an outage tells nothing of the inside.
 describe("while the database is away", () => {
   it("requests are asked to come back, nothing leaks, and all works again afterwards without a restart", async () => {
     const technician = await company.clientOf("technician");
@@ -88,6 +89,7 @@ describe("while the database is away", () => {
   });
 });
 
+// SEC-24: rights in the database.
 describe("the application's database user", () => {
   it("can neither change nor remove events and audit lines, nor touch the schema", async () => {
     const { url } = await workerDatabase();

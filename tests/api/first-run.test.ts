@@ -31,6 +31,7 @@ const body = (token: string) => ({
   supervisor: { name: "Ada Thorn", email: "ada@cinderlane.example", password: "seven invented words here" },
 });
 
+// SEC-22: no account by default.
 describe("the first run of an empty live installation", () => {
   it("opens with a link that is printed once and replaced by the next", async () => {
     const first = await openFirstRun(server.dependencies);
@@ -83,6 +84,7 @@ describe("the first run of an empty live installation", () => {
   });
 });
 
+// SEC-22 and SEC-26: secrets and the public address.
 describe("the environment of a live server", () => {
   const good = {
     EMBERLADDER_MODE: "live",
@@ -130,6 +132,7 @@ describe("the environment of a live server", () => {
     });
 });
 
+// SEC-21: headers of a proxy.
 describe("the address of a caller", () => {
   const signInFrom = async (target: TestServer, forwarded: string) =>
     (

@@ -123,6 +123,7 @@ describe("a forgotten password", () => {
   });
 });
 
+// SEC-06: passwords.
 describe("a password", () => {
   // Lengths after NIST SP 800-63B-4 as the quality criteria quote it; the block list is a library's.
   const cases: [string, string, number][] = [
@@ -179,6 +180,7 @@ describe("a password", () => {
   });
 });
 
+// SEC-01, SEC-03 and SEC-07: what a change of role, a disabled account and a lost factor do to sessions.
 describe("people of a company", () => {
   it("lose their sessions with a new role, and have its rights afterwards", async () => {
     const company = await makeCompany(server);

@@ -101,6 +101,7 @@ describe("units", () => {
   });
 });
 
+// SEC-20: what of a customer leaves the office.
 describe("calls", () => {
   it("show people on site the first name and the site, and no more of the customer", async () => {
     const company = await makeCompany(server);

@@ -13,6 +13,7 @@ beforeAll(async () => {
 });
 afterAll(async () => server.close());
 
+// SEC-08 and SEC-21: floods.
 describe("rate limits", () => {
   it("let a session make six hundred requests a minute, then ask it to wait, and let it on again", async () => {
     const limiter = createRateLimiter(server.database);

@@ -54,6 +54,7 @@ const snapshot = async (companyId: string) => {
   ]);
 };
 
+// SEC-10: every route against everybody.
 describe("the matrix of rights", () => {
   it("has every route that the server mounts, and the server every route of the contract", () => {
     const mounted = mountedRoutes("demo").map(({ name }) => name);

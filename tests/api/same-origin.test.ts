@@ -41,6 +41,7 @@ const change = async (site: string | undefined, origin: string | undefined, type
   });
 };
 
+// SEC-05: requests from another origin.
 describe("a change asked for with a session", () => {
   for (const site of SITES)
     for (const origin of ORIGINS)

@@ -18,6 +18,7 @@ const LIMITS: Record<Role, [idle: number, absolute: number]> = {
   supervisor: [30 * MINUTE, 12 * HOUR],
 };
 
+// SEC-02: idle and absolute limits.
 describe("a session", () => {
   for (const role of ROLES) {
     const [idle, absolute] = LIMITS[role];
@@ -43,6 +44,7 @@ describe("a session", () => {
   }
 });
 
+// SEC-08: delays.
 describe("tries to sign in", () => {
   const run = (count: number) => {
     let row: Parameters<typeof judgeTry>[0];

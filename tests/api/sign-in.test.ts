@@ -17,6 +17,7 @@ afterAll(async () => server.close());
 const codeNow = async (shiftSteps = 0) =>
   totpCode(TOTP_SECRET, totpStepAt(new Date(server.dependencies.clock())) + shiftSteps);
 
+// SEC-01, SEC-04 and SEC-08: secrets of a session, its cookie, tries to sign in.
 describe("signing in", () => {
   it("gives a technician a session, a device and the permissions of the role", async () => {
     const { people } = await makeCompany(server);
@@ -143,6 +144,7 @@ describe("signing in", () => {
   });
 });
 
+// SEC-07: two-step codes.
 describe("two-step codes", () => {
   it("limit a supervisor's session to the two-step routes until the code is passed", async () => {
     const { people } = await makeCompany(server);
@@ -237,6 +239,7 @@ describe("two-step codes", () => {
   });
 });
 
+// SEC-02 and SEC-03: how sessions end.
 describe("sessions", () => {
   it("end at once when the person is disabled", async () => {
     const company = await makeCompany(server);

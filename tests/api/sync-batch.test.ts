@@ -37,6 +37,7 @@ const stored = async (diagnosisId: string) =>
     .where(eq(events.diagnosisId, diagnosisId))
     .orderBy(asc(events.serverSeq));
 
+// SEC-12: order, repetition and rules of a record.
 describe("a batch of events", () => {
   it("is accepted in order with places from 1 without a gap, and its text stored as it was hashed", async () => {
     const record = startRecord(company);
@@ -359,6 +360,7 @@ describe("limits of a batch", () => {
   });
 });
 
+// SEC-12: locking.
 describe("batches side by side", () => {
   it("of one diagnosis give each event one place without a gap", async () => {
     const record = startRecord(company);

@@ -53,6 +53,7 @@ async function refusal(url: string, sql: string): Promise<number | undefined> {
   );
 }
 
+// SEC-22 and SEC-24: generated passwords, rights, no administrator over the network.
 describe("the database server", () => {
   test("keeps data, port and passwords over a restart, and its settings are readable by nobody else", async () => {
     const first = await start();

@@ -29,6 +29,7 @@ describe("the two-step code the launcher prints", () => {
   });
 });
 
+// SEC-22 and SEC-26: a live product does not start without its secrets and address.
 describe("settings", () => {
   const live = {
     EMBERLADDER_MODE: "live",

@@ -190,6 +190,7 @@ interface Diagnostic {
   filename: string;
 }
 
+// SEC-13: no SQL from text. UX-16: no number inputs. UX-36: words come from the catalogues.
 describe("lint rules", () => {
   let folder: string;
   let diagnostics: Diagnostic[];
