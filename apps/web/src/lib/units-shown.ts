@@ -1,9 +1,7 @@
+import { UNIT_SYSTEMS } from "@emberladder/field-math";
+import type { UnitSystem } from "@emberladder/field-math";
 import { useSyncExternalStore } from "react";
 import { useSession } from "./session.tsx";
-
-/** The two systems a reading can be shown in. What is stored never changes. */
-export const UNIT_SYSTEMS = ["inch-pound", "si"] as const;
-export type UnitSystem = (typeof UNIT_SYSTEMS)[number];
 
 const KEY = "emberladder.units";
 const listeners = new Set<() => void>();

@@ -1,14 +1,5 @@
-import {
-  cfhToCubicMetresPerHour,
-  cfmToLitresPerSecond,
-  fahrenheitRiseToCelsius,
-  fahrenheitToCelsius,
-  inchesToMillimetres,
-  inchesWaterToPascals,
-} from "@emberladder/field-math";
-import type { ReadingUnit } from "@emberladder/furnace";
-import { formatNumber } from "./format-number.ts";
-import type { UnitSystem } from "./units-shown.ts";
+import { displayReading } from "@emberladder/field-math";
+import type { StoredUnit, UnitSystem } from "@emberladder/field-math";
 
 /** A reading ready to be shown: its figure, and the key of its unit's sign in the message catalogues. */
 export interface ShownReading {
@@ -16,35 +7,36 @@ export interface ShownReading {
   unitKey: string;
 }
 
-interface SiUnit {
-  name: "Pa" | "mm" | "C" | "Lps" | "m3h";
-  /** Decimals that keep what the gauge could tell in its own unit. */
-  decimals: number;
-  convert: (value: number) => number;
-}
-
-const SI: Partial<Record<ReadingUnit, SiUnit>> = {
-  inwc: { name: "Pa", decimals: 1, convert: inchesWaterToPascals },
-  in: { name: "mm", decimals: 2, convert: inchesToMillimetres },
-  F: { name: "C", decimals: 1, convert: fahrenheitToCelsius },
-  CFM: { name: "Lps", decimals: 1, convert: cfmToLitresPerSecond },
-  cfh: { name: "m3h", decimals: 3, convert: cfhToCubicMetresPerHour },
+/** Signs that are not the trade's: the SI ones, and those that only a plate has. */
+const DESK_SIGNS: Record<string, string> = {
+  Pa: "desk:siUnits.Pa",
+  mm: "desk:siUnits.mm",
+  C: "desk:siUnits.C",
+  Lps: "desk:siUnits.Lps",
+  m3h: "desk:siUnits.m3h",
+  kW: "desk:siUnits.kW",
+  btuh: "desk:plateUnits.btuh",
 };
 
 /**
- * Shows a stored reading in the units asked for. The stored value never changes: this only writes it. Volts,
- * amps, ohms, ppm and seconds are the same in both systems. `isRise` is for differences of temperature.
+ * Writes a stored reading in the units asked for; what is stored never changes. In inch-pound units the figure is
+ * the stored one, digit for digit. `isRise` is for differences of temperature.
  */
 export function showReading(
   value: number | "OL",
-  unit: ReadingUnit,
+  unit: StoredUnit,
   system: UnitSystem,
   { isRise = false }: { isRise?: boolean } = {},
 ): ShownReading {
-  const si = system === "si" ? SI[unit] : undefined;
-  const unitKey = si ? `desk:siUnits.${si.name}` : `trade:units.${unit}`;
-  if (value === "OL" || !Number.isFinite(value)) return { figure: "OL", unitKey };
-  if (!si) return { figure: formatNumber(value), unitKey };
-  const converted = unit === "F" && isRise ? fahrenheitRiseToCelsius(value) : si.convert(value);
-  return { figure: Number(converted.toFixed(si.decimals)).toString(), unitKey };
+  const isOver = value === "OL" || !Number.isFinite(value);
+  const shown = displayReading(isOver ? 0 : value, unit, system, { isDifference: isRise });
+  const figure = isOver
+    ? "OL"
+    : writeFigure(shown.unit === unit ? value : Number(shown.value.toFixed(shown.decimals)));
+  return { figure, unitKey: DESK_SIGNS[shown.unit] ?? `trade:units.${shown.unit}` };
+}
+
+/** At most three decimals, no trailing zeros, thousands parted so that an input is read at a glance. */
+function writeFigure(value: number): string {
+  return value.toLocaleString("en-US", { maximumFractionDigits: 3 });
 }

@@ -1,4 +1,4 @@
-import type { ReadingUnit } from "@emberladder/furnace";
+import type { StoredUnit } from "@emberladder/field-math";
 import { useCallback } from "react";
 import { useTranslation } from "react-i18next";
 import { showReading } from "./units.ts";
@@ -7,7 +7,7 @@ import { useUnitsShown } from "./units-shown.ts";
 /** Writes stored readings with their sign in the units that this person sees. Needs the trade's words. */
 export function useFormatReading(): (
   value: number | "OL",
-  unit: ReadingUnit,
+  unit: StoredUnit,
   options?: { isRise?: boolean },
 ) => string {
   const { t } = useTranslation();

@@ -92,21 +92,15 @@ export function Form<Input extends FieldValues, Output>({
     form.setError("root.server", { type: "server", message: problemWords(problem) });
     isFocusDue.current = true;
   };
-  const send = form.handleSubmit(
-    async (values) => {
-      try {
-        await onSubmit(values);
-      } catch (problem) {
-        showProblem(problem);
-      }
-    },
-    () => {
-      isFocusDue.current = true;
-    },
-  );
   const submit = async () => {
     if (sending.current) return;
     sending.current = true;
+    const send = form.handleSubmit(
+      (values) => onSubmit(values),
+      () => {
+        isFocusDue.current = true;
+      },
+    );
     try {
       await send();
     } catch (problem) {

@@ -26,9 +26,11 @@ export function resolveBy<Input extends FieldValues, Output>(
       if (!first.has(name)) first.set(name, { type: code, message });
     }
     const errors: FieldErrors<Input> = {};
-    // Shorter names first: a list's own error must not replace those of its entries.
-    for (const [name, error] of [...first].toSorted(([a], [b]) => a.length - b.length))
-      set(errors, name, error);
+    for (const [name, error] of first) {
+      // A list's own error stands beside those of its entries, never in their place.
+      const hasEntries = [...first.keys()].some((other) => other.startsWith(`${name}.`));
+      set(errors, hasEntries ? `${name}.root` : name, error);
+    }
     return { values: {}, errors };
   };
 }

@@ -1,10 +1,11 @@
+import { UNIT_SYSTEMS } from "@emberladder/field-math";
 import { useTranslation } from "react-i18next";
 import { ChoiceGroup } from "#components/forms/choice-group.tsx";
 import { Section } from "#components/ui/page-head.tsx";
 import { chooseHandedness, HANDS, useHandedness } from "#lib/handedness.ts";
 import { chooseScheme, SCHEMES, useScheme } from "#lib/scheme.ts";
 import { useMe } from "#lib/session.tsx";
-import { chooseUnits, UNIT_SYSTEMS, useUnitChoice } from "#lib/units-shown.ts";
+import { chooseUnits, useUnitChoice } from "#lib/units-shown.ts";
 
 /** How the screens look on this device: colours, units, and the side of the ladder. Each choice holds at once. */
 export function AppearanceSection() {

@@ -88,7 +88,7 @@ function CallPage({ call, isKept }: { call: CallDetail; isKept: boolean }) {
               {t(`desk:callStatus.${call.status}`)}.{" "}
               {call.assignedTo
                 ? t("desk:call.assignedTo", { name: call.assignedTo.name })
-                : t("desk:calls.nobody")}
+                : t("desk:call.nobody")}
             </p>
             <StartAct call={call} />
           </section>

@@ -11,17 +11,14 @@ export function PlateFacts({ profile }: { profile: UnitProfile }) {
   const rows = PLATE_FIELDS.flatMap(({ name, unit, isRise }) => {
     const value = profile.plate[name];
     if (value === undefined) return [];
-    const shown =
-      value === null
-        ? t("desk:plate.none")
-        : typeof value === "string"
-          ? t(`desk:igniterKinds.${value}`)
-          : unit === undefined
-            ? String(value)
-            : unit === "btuh" || unit === "VA" || unit === "btuPerFt3"
-              ? `${value.toLocaleString("en-US")} ${t(`desk:plateUnits.${unit}`)}`
-              : format(value, unit, { isRise });
-    return [{ name: t(`desk:plate.${name}`), value: shown }];
+    const shown = () => {
+      if (value === null) return t("desk:plate.none");
+      if (typeof value === "string") return t(`desk:igniterKinds.${value}`);
+      if (unit === undefined) return String(value);
+      if (unit === "VA" || unit === "btuPerFt3") return `${value} ${t(`desk:plateUnits.${unit}`)}`;
+      return format(value, unit, { isRise });
+    };
+    return [{ name: t(`desk:plate.${name}`), value: shown() }];
   });
   const timings = TIMING_FIELDS.flatMap(({ name, unit }) => {
     const value = profile.timings[name];
