@@ -8,7 +8,7 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 
 /*
- * The walk of the shipped tree, replayed from the record alone. That an application checks the order of the steps
+ * SEC-12. The walk of the shipped tree, replayed from the record alone. That an application checks the order of the steps
  * of a procedure on its server is ASVS 2.3.1 (from memory).
  */
 const tree = hotSurfaceInducedTree;

@@ -23,7 +23,7 @@ describe("a sound tree", () => {
   });
 });
 
-/** One fault seeded for each: the rule that has to name it, where, and how heavily. */
+/** UX-13 and UX-14 among them: every question has a way past it, and none comes twice. One fault for each: the rule that has to name it, where, and how heavily. */
 const SEEDED: [TreeRule, TreeDocument, string | undefined, TreeProblem["severity"]][] = [
   ["applies-unreadable", buildTree({ applies: "ign:HSX" }), undefined, "error"],
   ["applies-to-no-unit", buildTree({ applies: "ign:SP & draft:CON" }), undefined, "error"],
