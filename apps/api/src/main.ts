@@ -30,6 +30,11 @@ async function serve(): Promise<void> {
     if (link) process.stdout.write(`Set up this installation, once, within a day: ${link}\n`);
   }
 
+  if (environment.mode === "demo") {
+    const { seedDemoRecords } = await import("./dev/seed-demo-records.ts");
+    await seedDemoRecords(dependencies);
+  }
+
   const server = createApp(dependencies).listen(environment.port, environment.host, (error?: Error) => {
     if (!error) {
       log.info({ port: environment.port }, "listening");

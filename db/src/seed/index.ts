@@ -7,3 +7,8 @@ export { profileOf } from "./reference-call.ts";
 export type { ReferenceCall } from "./reference-call.ts";
 export { recordOf } from "./reference-record.ts";
 export type { RecordFrame, RecordStep } from "./reference-record.ts";
+export { referenceCalls } from "./reference-calls.ts";
+export { arrivalOf, inventNote, sealRecord } from "./seal-record.ts";
+export type { RecordDevice } from "./seal-record.ts";
+export { demoRecords } from "./demo-records.ts";
+export type { DemoRecord } from "./demo-records.ts";

@@ -147,15 +147,13 @@ async function seedCall(
   await tx
     .insert(sites)
     .values({ id: ids.site, customerId: ids.customer, ...owner, ...call.site, altitudeFt: 4300 });
-  await tx
-    .insert(units)
-    .values({
-      id: ids.unit,
-      siteId: ids.site,
-      ...owner,
-      name: call.unitName,
-      profile: withFreshFlueCo(call.profile, now),
-    });
+  await tx.insert(units).values({
+    id: ids.unit,
+    siteId: ids.site,
+    ...owner,
+    name: call.unitName,
+    profile: withFreshFlueCo(call.profile, now),
+  });
   await tx.insert(calls).values({
     id: ids.call,
     ...owner,
