@@ -44,7 +44,7 @@ test("01: a coated flame sensor is found, proven, mailed and can be reviewed", a
       .getByRole("button", { name: new RegExp(`^${item}`) })
       .first()
       .click();
-  await hands.tap(/Status light: something found/);
+  await hands.tap("Note Status light");
   await hands.tap("Flame not proved");
   await hands.tap("Watch a call for heat");
   await hands.tap("None", { exact: true });
@@ -84,7 +84,7 @@ test("10: a forgotten filter seen in the first look is settled without a watch, 
   const hands = new Hands(page);
   await hands.start(callId);
   await hands.allWell();
-  await hands.tap(/Filter: something found/);
+  await hands.tap("Hit Filter");
   await hands.tap("Loaded", { exact: true });
   await hands.at("conclude");
   await hands.tap(/^Record: /);
@@ -111,7 +111,7 @@ test("06: an open exchanger behind a tripped rollout switch is left shut off, wi
   await hands.start(callId);
   await hands.allWell();
   // Soot at the unit: no firing, so the call is watched with the gas shut.
-  await hands.tap(/At the unit: something found/);
+  await hands.tap("Hit At the unit");
   await hands.tap(/Soot/);
   await hands.tap("Record what is at the unit");
   await hands.at("stop");

@@ -1,4 +1,5 @@
 import type { ReactNode } from "react";
+import { takeFirstTap } from "./take-first-tap.ts";
 
 /**
  * One answer of a look: symbol at the left, the word, the band at the right. Chosen is a thick border and an
@@ -21,7 +22,7 @@ export function AnswerButton({
     <button
       type="button"
       aria-pressed={chosen}
-      onClick={onChoose}
+      onClick={takeFirstTap(onChoose)}
       className={`flex min-h-14 w-full items-stretch rounded bg-surface text-left text-field font-semibold text-ink ${chosen ? "border-4 border-ink" : "border-2 border-rule"}`}
     >
       <span

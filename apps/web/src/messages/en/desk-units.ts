@@ -36,7 +36,7 @@ export const deskUnits = {
     correct: "Correct the unit",
     newTitle: "New unit",
     editTitle: "Correct {{name}}",
-    addTo: "Add a unit at {{address}}",
+    addTo: "New unit at {{address}}",
     add: "Add the unit",
     save: "Save the unit",
   },
@@ -116,7 +116,7 @@ export const deskUnits = {
     sourceHint: "Plate, sheet or letter, so that others can look.",
     add: "Add a band",
     remove: "Take it out",
-    removeOf: "Take band {{number}} out",
+    removeOf: "Take it out: band {{number}}",
   },
   history: {
     caption: "Diagnoses on {{unit}}",

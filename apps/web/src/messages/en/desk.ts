@@ -217,7 +217,7 @@ export const desk = {
     noDevice: "Unnamed browser",
     lastUsed: "Last used {{at}}",
     end: "End it",
-    endOf: "End the session on {{name}}",
+    endOf: "End it: session on {{name}}",
     endOthers: "End all others",
   },
   sync: {

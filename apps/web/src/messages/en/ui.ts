@@ -80,7 +80,7 @@ export const ui = {
   dock: {
     label: "Always at hand",
     putBack: "Put back",
-    putBackLabel: "Put back: {{count}} still out",
+    stillOut: ", still out",
     safety: "Smell gas? CO alarm?",
   },
 } as const;

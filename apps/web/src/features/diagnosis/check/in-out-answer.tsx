@@ -111,16 +111,18 @@ export function InOutAnswer({ task, frame }: { task: CheckTask; frame: Frame }) 
           onSubmit={record}
         />
       </div>
-      <ul className="flex flex-col gap-1" role="status">
-        {VERDICTS.map((verdict) => (
-          <li
-            key={verdict}
-            className={`px-3 py-1.5 text-field ${verdict === contact ? "rounded bg-stopped font-semibold text-on-stopped" : "text-quiet short:hidden"}`}
-          >
-            {t(`inOut.${verdict}`)}
-          </li>
-        ))}
-      </ul>
+      <div role="status">
+        <ul className="flex flex-col gap-1">
+          {VERDICTS.map((verdict) => (
+            <li
+              key={verdict}
+              className={`px-3 py-1.5 text-field ${verdict === contact ? "rounded bg-stopped font-semibold text-on-stopped" : "text-quiet short:hidden"}`}
+            >
+              {t(`inOut.${verdict}`)}
+            </li>
+          ))}
+        </ul>
+      </div>
       {classified?.outcome && classified.outcome !== "good" && (
         <FindingPicker check={check} findings={fitting} chosen={finding} onChoose={setFinding} />
       )}

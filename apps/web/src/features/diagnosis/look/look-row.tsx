@@ -42,10 +42,10 @@ export function LookRow({
         type="button"
         aria-pressed={hit}
         onClick={onHit}
-        aria-label={t("look.hitLabel", { item: t([`trade:firstLook.${item}.title`, "look.atUnitName"]) })}
         className={`min-h-14 rounded text-field font-semibold ${hit ? "border-4 border-ink bg-stopped text-on-stopped" : "border-2 border-rule bg-ground"}`}
       >
         {t(item === "status-light" ? "look.note" : "look.hit")}
+        <span className="sr-only">{` ${t([`trade:firstLook.${item}.title`, "look.atUnitName"])}`}</span>
       </button>
     </li>
   );

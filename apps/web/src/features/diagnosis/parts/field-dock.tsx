@@ -17,14 +17,16 @@ export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: 
       <Link
         to={paths.diagnosis.putBack(diagnosisId)}
         className="flex items-center justify-center gap-2 text-label leading-4.5 font-medium text-ink no-underline"
-        aria-label={t("dock.putBackLabel", { count: out })}
       >
         <span
           className={`numeric grid size-7 place-items-center rounded border-2 ${out > 0 ? "border-ink bg-ink text-ground" : "border-rule"}`}
         >
           {out}
         </span>
-        <span className="w-11">{t("dock.putBack")}</span>
+        <span className="w-11">
+          {t("dock.putBack")}
+          <span className="sr-only">{t("dock.stillOut")}</span>
+        </span>
       </Link>
       <SavedChip />
       <Link

@@ -61,7 +61,7 @@ export function FieldLayout({
         )}
         <main
           className="flex min-w-0 grow flex-col overflow-y-auto"
-          tabIndex={-1}
+          tabIndex={0}
           aria-label={t("field.step")}
         >
           <div className="mx-auto group flex w-full max-w-[560px] grow flex-col gap-3 p-4 short:gap-2 short:py-3">

@@ -2,6 +2,7 @@ import type { Rung } from "@emberladder/diagnosis";
 import type { Sight, Span } from "@emberladder/furnace";
 import { useEffect, useRef } from "react";
 import { useTranslation } from "react-i18next";
+import { takeFirstTap } from "#components/ui/take-first-tap.ts";
 import { formatClock } from "#lib/use-now.ts";
 
 /**
@@ -46,7 +47,7 @@ export function SightRow({
     <li ref={row} className="flex flex-col">
       <button
         type="button"
-        onClick={onSee}
+        onClick={takeFirstTap(onSee)}
         disabled={seen}
         className="flex min-h-14 items-center gap-3 px-3 short:min-h-12 text-left text-[1.25rem] font-semibold text-ink"
       >
