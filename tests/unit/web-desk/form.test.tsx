@@ -108,7 +108,7 @@ describe("a form of the desk", () => {
     await user.type(screen.getByLabelText("Manifold"), "14");
     await user.click(send());
     await vi.waitFor(() => expect(onSubmit).toHaveBeenCalledOnce());
-    expect(screen.queryByRole("alert")).toBeNull();
+    await vi.waitFor(() => expect(screen.queryByRole("alert")).toBeNull());
     expect(document.title).toBe("New unit");
   });
 

@@ -9,9 +9,9 @@ export function RecoveryCodes({ codes, onKept }: { codes: readonly string[]; onK
   return (
     <div className="flex flex-col gap-4">
       <p className="text-field desk:text-desk">{t("desk:twoStep.recoveryNote")}</p>
-      <ol className="numeric border-2 border-ink bg-surface p-3 text-label leading-7 desk:text-desk">
+      <ol className="numeric border-2 border-ink bg-surface p-3 text-label leading-7 break-words desk:text-desk">
         {codes.map((code) => (
-          <li key={code} className="break-all select-all">
+          <li key={code} className="select-all">
             {code}
           </li>
         ))}

@@ -36,9 +36,7 @@ export function SetUpTwoStep({
       <QrCode text={made.data.uri} label={t("desk:twoStep.picture")} />
       <div>
         <p className="text-field text-quiet desk:text-desk">{t("desk:twoStep.typeSecret")}</p>
-        <p className="numeric text-field font-semibold break-all select-all">
-          {groupsOfFour(made.data.secret)}
-        </p>
+        <p className="numeric text-field font-semibold select-all">{groupsOfFour(made.data.secret)}</p>
       </div>
       <Form
         schema={schema}

@@ -1,4 +1,5 @@
 import type { Call } from "@emberladder/contract";
+import { useId } from "react";
 import { useTranslation } from "react-i18next";
 import { Link } from "react-router-dom";
 import { CallLadder } from "#components/ladder/call-ladder.tsx";
@@ -18,11 +19,18 @@ export function CallRow({
 }) {
   const { t } = useTranslation();
   const { site, unit } = call;
+  const nameId = useId();
   const isOver = call.status === "done" || call.status === "cancelled";
   return (
     <li
       className={`relative border-b px-4 py-3 desk:px-6 ${isNext ? "border-b-2 border-ink bg-surface shadow-[inset_6px_0_0_var(--ink)]" : "border-hair"}`}
     >
+      {/* The whole row is the target. */}
+      <Link
+        to={paths.call(call.id)}
+        aria-labelledby={nameId}
+        className="absolute inset-0 -outline-offset-3"
+      />
       <div className="grid grid-cols-[3.75rem_1fr_auto] items-start gap-x-2 desk:grid-cols-[7rem_minmax(0,5fr)_minmax(0,6fr)_12rem_auto] desk:gap-x-6">
         <p className="numeric text-field font-semibold">
           {formatTime(call.scheduledFor, call.timeZone)}
@@ -33,11 +41,8 @@ export function CallRow({
           </span>
         </p>
         <div className="min-w-0">
-          <h3 className="text-[1.1875rem] leading-6 font-semibold">
-            {/* The whole row is the target: the link spreads over it. */}
-            <Link to={paths.call(call.id)} className="text-ink no-underline after:absolute after:inset-0">
-              {call.customerFirstName}
-            </Link>
+          <h3 id={nameId} className="text-[1.1875rem] leading-6 font-semibold">
+            {call.customerFirstName}
           </h3>
           <p className="text-field text-quiet desk:text-desk">
             {site.address}, {site.town}

@@ -56,12 +56,15 @@ export function CustomersScreen() {
             key={customer.id}
             className="relative grid gap-x-6 border-b border-hair px-4 py-3 hover:bg-surface desk:grid-cols-[2fr_2fr_1fr_1fr] desk:items-center desk:px-6"
           >
+            {/* The whole row is the target. */}
             <Link
               to={paths.customer(customer.id)}
-              className="text-field font-semibold text-ink no-underline after:absolute after:inset-0 desk:text-desk"
-            >
+              aria-labelledby={`customer-${customer.id}`}
+              className="absolute inset-0 -outline-offset-3"
+            />
+            <span id={`customer-${customer.id}`} className="text-field font-semibold desk:text-desk">
               {[customer.firstName, customer.lastName].filter(Boolean).join(" ")}
-            </Link>
+            </span>
             <span className="text-field break-words text-quiet desk:text-desk">
               {customer.email ?? t("desk:customers.noEmail")}
             </span>
