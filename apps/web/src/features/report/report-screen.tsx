@@ -39,7 +39,7 @@ export function ReportScreen() {
 function ReportPage({ report, pdfAddress }: { report: Report; pdfAddress: string }) {
   const { t } = useTranslation();
   return (
-    <div className="mx-auto max-w-160 desk:my-6 desk:border-2 desk:border-ink print:m-0 print:border-0">
+    <div className="mx-auto max-w-160 desk:my-6 desk:border-2 desk:border-ink print:m-0 print:max-w-none print:border-0">
       <header className="flex items-center justify-between gap-3 border-b-3 border-ink bg-surface px-4 py-3">
         <p className="text-field font-semibold">{report.companyName}</p>
         {report.isDemo && (
