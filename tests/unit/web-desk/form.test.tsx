@@ -46,10 +46,10 @@ describe("a form of the desk", () => {
     await user.type(screen.getByLabelText("Manifold"), "about three");
     await user.click(send());
     const summary = await screen.findByRole("alert");
-    expect(document.activeElement).toBe(summary);
+    await vi.waitFor(() => expect(document.activeElement).toBe(summary));
     expect(screen.getByRole("link", { name: "Name: Enter a name." })).toBeTruthy();
     expect(screen.getByRole("link", { name: "Manifold: Enter a number." })).toBeTruthy();
-    expect(document.title).toBe("Error: New unit");
+    await vi.waitFor(() => expect(document.title).toBe("Error: New unit"));
   });
 
   it("moves the focus to the field whose link in the summary is followed", async () => {
@@ -109,7 +109,7 @@ describe("a form of the desk", () => {
     await user.click(send());
     await vi.waitFor(() => expect(onSubmit).toHaveBeenCalledOnce());
     await vi.waitFor(() => expect(screen.queryByRole("alert")).toBeNull());
-    expect(document.title).toBe("New unit");
+    await vi.waitFor(() => expect(document.title).toBe("New unit"));
   });
 
   it("sends once when the button is tapped five times", async () => {
