@@ -12,6 +12,7 @@ export * from "./derive/check-state.ts";
 export * from "./decide.ts";
 export type { Breach } from "./rules/breach.ts";
 export * from "./rules/conclude-rules.ts";
+export { standingConclusionRules } from "./rules/closing-rules.ts";
 export * from "./derive/stops.ts";
 export * from "./derive/proof.ts";
 export * from "./derive/steps.ts";

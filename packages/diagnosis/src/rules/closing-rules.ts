@@ -6,6 +6,7 @@ import type { DiagnosisState } from "../state/diagnosis-state.ts";
 import { openStops, stopsOf } from "../derive/stops.ts";
 import { breachWhere } from "./breach.ts";
 import type { Breach } from "./breach.ts";
+import { concludeRules } from "./conclude-rules.ts";
 
 /** Rules of a closing check: one there is, with what it needs, and a downstream leak check only with a flame. */
 export function proofRules(state: DiagnosisState, body: BodyOf<"proof.recorded">): Breach[] {
@@ -21,7 +22,7 @@ export function proofRules(state: DiagnosisState, body: BodyOf<"proof.recorded">
 }
 
 /**
- * Rules of closing. As fixed only with a proven cause, a repair, nothing out and the whole proof passed; with
+ * Rules of closing. As fixed only with a proven cause that its evidence still shows, a repair, nothing out and the whole proof passed; with
  * a safety bypassed only as shut off; with a stop rule open only as shut off or referred; a unit left off with
  * what a unit left off needs.
  */
@@ -59,6 +60,7 @@ export function closeRules(state: DiagnosisState, body: BodyOf<"diagnosis.closed
         ordered && { rule: "part-still-ordered" },
         out.length > 0 && { rule: "put-back-open", params: { count: out.length } },
       ),
+      ...standingConclusionRules(state),
       ...proofBreaches(state, outcome, now),
     ];
   }
@@ -75,6 +77,14 @@ export function closeRules(state: DiagnosisState, body: BodyOf<"diagnosis.closed
     ...general,
     ...proofBreaches(state, outcome, now).filter((breach) => breach.params?.["closing"] !== "close-jumpers"),
   ];
+}
+
+/**
+ * What a proven conclusion is against by now: a reading that it rests on may have been taken back or put right
+ * after it was written. A closing as fixed refuses such a one; a unit that is left off is never held up by it.
+ */
+export function standingConclusionRules({ conclusion, ...state }: DiagnosisState): Breach[] {
+  return conclusion?.proven ? concludeRules({ ...state, conclusion }, conclusion) : [];
 }
 
 function proofBreaches(

@@ -1,4 +1,11 @@
-import { breaches, evolve, initialState, lastStageOf, parseBody } from "@emberladder/diagnosis";
+import {
+  breaches,
+  evolve,
+  initialState,
+  lastStageOf,
+  parseBody,
+  standingConclusionRules,
+} from "@emberladder/diagnosis";
 import type {
   BodyOf,
   Breach,
@@ -64,11 +71,21 @@ export function evolveState(
 export function findBreaches(state: DiagnosisState, read: ReadBody, at: number): Breach[] {
   if (read.kind !== "known") return [{ rule: "unknown-step" }];
   try {
-    return breaches(state, read.event, { now: at });
+    const found = breaches(state, read.event, { now: at });
+    return read.event.type === "diagnosis.closed" ? withConclusion(found, state) : found;
   } catch {
     // A record that the rules cannot judge is kept all the same, and somebody has to look at it.
     return [{ rule: "not-judged" }];
   }
+}
+
+/**
+ * With what the conclusion is against at the closing, however the visit ended: the customer is told of the
+ * cause even where the unit is left off.
+ */
+function withConclusion(found: Breach[], state: DiagnosisState): Breach[] {
+  const more = standingConclusionRules(state);
+  return [...found, ...more.filter(({ rule }) => !found.some((known) => known.rule === rule))];
 }
 
 /** What lists and jobs need to know of a state. */
