@@ -3,13 +3,14 @@ import type { ReportContent } from "@emberladder/contract";
 import PdfDocument from "pdfkit";
 
 const require = createRequire(import.meta.url);
-const FONTS = {
+/** The font files that go into the PDF. */
+export const PDF_FONTS = {
   text: require.resolve("@fontsource/ibm-plex-sans/files/ibm-plex-sans-latin-400-normal.woff"),
   strong: require.resolve("@fontsource/ibm-plex-sans/files/ibm-plex-sans-latin-600-normal.woff"),
 };
 
 /** Headings of the printed report, in English. */
-const WORDS = {
+export const PDF_WORDS = {
   title: "Furnace report",
   demo: "Invented example. Nothing in it was measured on a real unit.",
   complaint: "What you told us",
@@ -34,7 +35,7 @@ export async function renderReportPdf(content: ReportContent, madeAt: Date): Pro
     tagged: true,
     displayTitle: true,
     info: {
-      Title: `${WORDS.title}, call ${content.callNumber}`,
+      Title: `${PDF_WORDS.title}, call ${content.callNumber}`,
       Author: content.companyName,
       CreationDate: madeAt,
     },
@@ -45,7 +46,7 @@ export async function renderReportPdf(content: ReportContent, madeAt: Date): Pro
     pdf.on("end", () => resolve());
     pdf.on("error", reject);
   });
-  for (const [name, path] of Object.entries(FONTS)) pdf.registerFont(name, path);
+  for (const [name, path] of Object.entries(PDF_FONTS)) pdf.registerFont(name, path);
   write(pdf, content);
   pdf.end();
   await done;
@@ -59,35 +60,35 @@ function write(pdf: PDFKit.PDFDocument, content: ReportContent): void {
     for (const text of texts) pdf.text(text, { paragraphGap: 3 });
   };
 
-  pdf.font("strong").fontSize(20).text(WORDS.title);
+  pdf.font("strong").fontSize(20).text(PDF_WORDS.title);
   lines([
     `${content.companyName}, call ${content.callNumber}`,
     content.visited,
     `${content.customerFirstName}, ${content.siteAddress}`,
     `${content.unitName}. ${content.technicianName}.`,
   ]);
-  if (content.isDemo) pdf.moveDown(0.4).font("strong").fontSize(11).text(WORDS.demo);
-  heading(WORDS.safe);
+  if (content.isDemo) pdf.moveDown(0.4).font("strong").fontSize(11).text(PDF_WORDS.demo);
+  heading(PDF_WORDS.safe);
   lines([content.safe.text]);
-  heading(WORDS.complaint);
+  heading(PDF_WORDS.complaint);
   lines([content.complaint]);
-  heading(WORDS.found);
+  heading(PDF_WORDS.found);
   lines(content.found);
-  heading(WORDS.done);
+  heading(PDF_WORDS.done);
   lines(content.done);
   if (content.measured.length > 0) {
-    heading(WORDS.measured);
+    heading(PDF_WORDS.measured);
     lines(
       content.measured.map(({ what, reading, expected, verdict }) =>
-        [`${what}: ${reading}`, expected && `${WORDS.expected} ${expected}`, verdict]
+        [`${what}: ${reading}`, expected && `${PDF_WORDS.expected} ${expected}`, verdict]
           .filter(Boolean)
           .join("; "),
       ),
     );
   }
-  heading(WORDS.next);
+  heading(PDF_WORDS.next);
   lines(content.next);
-  heading(WORDS.cautions);
+  heading(PDF_WORDS.cautions);
   lines(content.cautions);
-  pdf.moveDown(1).font("text").fontSize(8).text(`${WORDS.record} ${content.recordHash}`);
+  pdf.moveDown(1).font("text").fontSize(8).text(`${PDF_WORDS.record} ${content.recordHash}`);
 }
