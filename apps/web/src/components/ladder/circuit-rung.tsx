@@ -61,7 +61,7 @@ export function CircuitRungDrawing({
           key={index}
           x={contact.x}
           y={y}
-          closed={lit}
+          closed={lit && rung.stage !== "draft-rest"}
           normallyClosed={contact.normallyClosed}
           wide={isStopped && index === placed.length - 1}
           quiet={quiet}

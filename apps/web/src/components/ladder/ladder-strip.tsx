@@ -35,7 +35,7 @@ export function LadderStrip({
     <button
       type="button"
       onClick={onOpen}
-      className="relative w-12 shrink-0 border-r-2 border-hair bg-ground p-0"
+      className="focus-inside relative w-12 shrink-0 border-r-2 border-hair bg-ground p-0"
       aria-label={t("ladder.open")}
     >
       <svg

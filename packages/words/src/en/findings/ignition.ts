@@ -60,7 +60,7 @@ export const ignition = {
   "ck-valve-coil-ohms": { open: "Open", shorted: "Shorted" },
   "ck-valve-current": { zero: "None", high: "High" },
   "ck-flame-current": {
-    zero: "None",
+    zero: "No signal at all",
     low: "Low",
     "recovers-cleaned": "Recovers, cleaned",
     "recovers-bonded": "Recovers, bonded",
