@@ -31,7 +31,9 @@ export const paths = {
     confirm: (id: string) => `/diagnoses/${id}/confirm`,
     look: (id: string) => `/diagnoses/${id}/look`,
     watch: (id: string) => `/diagnoses/${id}/watch`,
-    check: (id: string) => `/diagnoses/${id}/check`,
+    check: (id: string, check?: string) => `/diagnoses/${id}/check${check ? `?check=${check}` : ""}`,
+    /** A check opened to change its answer: what was recorded is filled in. */
+    changeCheck: (id: string, check: string) => `/diagnoses/${id}/check?check=${check}&change=1`,
     causes: (id: string) => `/diagnoses/${id}/checks`,
     conclude: (id: string, fault?: string) => `/diagnoses/${id}/conclude${fault ? `?cause=${fault}` : ""}`,
     repair: (id: string) => `/diagnoses/${id}/repair`,

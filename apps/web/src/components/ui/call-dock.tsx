@@ -19,7 +19,7 @@ export function CallDock() {
       </Suspense>
       <Link
         to={paths.safety}
-        className="grid place-items-center border-2 border-caution-edge bg-caution px-1 text-center text-label font-semibold text-on-caution no-underline"
+        className="focus-inside grid place-items-center border-2 border-caution-edge bg-caution px-1 text-center text-label font-semibold text-on-caution no-underline"
       >
         {t("dock.safety")}
       </Link>

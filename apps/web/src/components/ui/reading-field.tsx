@@ -34,7 +34,7 @@ export function ReadingField({
       <label htmlFor={id} className="mb-1 block text-field font-semibold first-letter:uppercase">
         {label}
       </label>
-      <div className="flex h-15 items-center gap-2 rounded border-3 border-ink bg-surface px-3">
+      <div className="flex h-15 items-center gap-2 rounded border-3 border-ink bg-surface px-3 outline-offset-2 outline-link has-[input:focus-visible]:outline-3">
         <input
           id={id}
           ref={inputRef}

@@ -14,7 +14,7 @@ export function SavedChip() {
   return (
     <Link
       to={paths.sync}
-      className={`flex items-center justify-center gap-2 border-x-2 border-hair px-1 text-label leading-4.5 font-medium no-underline ${alarming ? "bg-stopped text-on-stopped" : "text-ink"}`}
+      className={`focus-inside flex items-center justify-center gap-2 border-x-2 border-hair px-1 text-label leading-4.5 font-medium no-underline ${alarming ? "bg-stopped text-on-stopped" : "text-ink"}`}
     >
       <svg
         viewBox="0 0 22 30"

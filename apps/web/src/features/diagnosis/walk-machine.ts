@@ -1,5 +1,6 @@
-import { stepOf } from "@emberladder/diagnosis";
+import { stepOf, treePosition } from "@emberladder/diagnosis";
 import type { DiagnosisState, WalkStep } from "@emberladder/diagnosis";
+import { isAsking } from "@emberladder/trees";
 import type { TreeDocument } from "@emberladder/trees";
 import { assign, setup } from "xstate";
 import { paths } from "#lib/paths.ts";
@@ -40,7 +41,7 @@ const PATH_OF_STEP: Record<WalkStep, (diagnosisId: string) => string> = {
   confirm: paths.diagnosis.confirm,
   look: paths.diagnosis.look,
   watch: paths.diagnosis.watch,
-  check: paths.diagnosis.check,
+  check: (id) => paths.diagnosis.check(id),
   checks: paths.diagnosis.causes,
   conclude: paths.diagnosis.conclude,
   repair: paths.diagnosis.repair,
@@ -58,7 +59,16 @@ export function givesWayToStop(screen: string): boolean {
   return !OPEN_WHILE_STOPPED.includes(screen);
 }
 
-/** The address of the screen for the next step of a diagnosis. */
+/**
+ * The address of the screen for the next step of a diagnosis. A check is named in its address, so that the way
+ * back leads to the check that was seen and not to the one that is next by then.
+ */
 export function pathOfNext(diagnosisId: string, state: DiagnosisState, tree: TreeDocument | null): string {
-  return PATH_OF_STEP[stepOf(state, tree, Date.now())](diagnosisId);
+  const step = stepOf(state, tree, Date.now());
+  if (step !== "check") return PATH_OF_STEP[step](diagnosisId);
+  const node = tree ? treePosition(tree, state).node : null;
+  return paths.diagnosis.check(
+    diagnosisId,
+    state.current?.check ?? (node && isAsking(node) ? node.check : undefined),
+  );
 }

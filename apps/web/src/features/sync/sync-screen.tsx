@@ -3,7 +3,7 @@ import { ActButton } from "#components/ui/act.tsx";
 import { EmptyNote } from "#components/ui/list-states.tsx";
 import { PageHead, Section } from "#components/ui/page-head.tsx";
 import { saveFile } from "#lib/save-file.ts";
-import { useMe } from "#lib/session.tsx";
+import { useMe, useSession } from "#lib/session.tsx";
 import { formatMoment } from "#lib/site-time.ts";
 import { requestSend } from "#lib/store/sender.ts";
 import { useSaved } from "#lib/store/use-saved.ts";
@@ -16,6 +16,7 @@ import { WaitingItem } from "./waiting-item.tsx";
 export function SyncScreen() {
   const { t } = useTranslation();
   const { person, company } = useMe();
+  const session = useSession();
   const saved = useSaved();
   const waiting = useWaiting();
   const save = async () => saveFile("emberladder-waiting.json", "application/json", await exportWaiting());
@@ -38,7 +39,16 @@ export function SyncScreen() {
         <Section
           title={t("desk:sync.waiting", { count: saved.waiting })}
           note={t(`desk:sync.kinds.${saved.kind}`)}
-          acts={<ActButton onClick={requestSend}>{t("desk:sync.sendNow")}</ActButton>}
+          acts={
+            saved.kind === "needs-sign-in" ? (
+              // The session ended on the server; giving it up here leads to the form and back to this screen.
+              <ActButton kind="solid" onClick={() => session.set(null)}>
+                {t("desk:signIn.submit")}
+              </ActButton>
+            ) : (
+              <ActButton onClick={requestSend}>{t("desk:sync.sendNow")}</ActButton>
+            )
+          }
         >
           <ul>
             {waiting.map((item) => (

@@ -1,4 +1,5 @@
 import { command, openingsToAdd } from "@emberladder/diagnosis";
+import type { Observation } from "@emberladder/diagnosis";
 import { getCheck } from "@emberladder/furnace";
 import type { CheckId } from "@emberladder/furnace";
 import type { AskingNode } from "@emberladder/trees";
@@ -25,13 +26,23 @@ export interface CheckTask {
   check: CheckId;
   node: AskingNode | undefined;
   way: string | undefined;
+  /** What was recorded here before, filled in; undefined where the check is to be taken. */
+  given: Observation | undefined;
 }
 
 /**
  * One check on one page: hazard, instruction, state of the unit, the answer, what it means, the act. A check
  * that opens something is started first, so that the put-back list holds it while it is out.
  */
-export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | undefined }) {
+export function CheckPage({
+  check,
+  node,
+  given,
+}: {
+  check: CheckId;
+  node: AskingNode | undefined;
+  given?: Observation;
+}) {
   const { t } = useTranslation();
   const work = useDiagnosis();
   const { diagnosisId, state, profile } = work;
@@ -40,11 +51,13 @@ export function CheckPage({ check, node }: { check: CheckId; node: AskingNode | 
   const [showing, setShowing] = useState<"answer" | "why" | "cannot">("answer");
   const definition = getCheck(check);
   const started = state.current?.check === check ? state.current : null;
-  const way = started?.way ?? node?.way;
+  const way = started?.way ?? node?.way ?? given?.way;
   const ways = definition.ways ?? [];
   const mustStart =
-    !started && ((ways.length > 1 && node?.way === undefined) || openingsToAdd(state, check, way).length > 0);
-  const task: CheckTask = { check, node, way };
+    !started &&
+    ((ways.length > 1 && node?.way === undefined && given?.way === undefined) ||
+      openingsToAdd(state, check, way).length > 0);
+  const task: CheckTask = { check, node, way, given };
   const afterRepair = state.repairs.length > 0;
 
   if (showing === "cannot") return <CannotDo task={task} onBack={() => setShowing("answer")} />;

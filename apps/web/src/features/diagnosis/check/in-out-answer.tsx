@@ -22,10 +22,10 @@ const VERDICTS: ContactReading[] = ["closed", "open", "no-path", "none-fits"];
 export function InOutAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
   const { t } = useTranslation();
   const { state, profile, recordAndGoOn } = useDiagnosis();
-  const { check, way, node } = task;
-  const [inText, setIn] = useState("");
-  const [outText, setOut] = useState("");
-  const [finding, setFinding] = useState<string | undefined>();
+  const { check, way, node, given } = task;
+  const [inText, setIn] = useState(given?.inV === undefined ? "" : String(given.inV));
+  const [outText, setOut] = useState(given?.outV === undefined ? "" : String(given.outV));
+  const [finding, setFinding] = useState<string | undefined>(given?.finding);
   const [error, setError] = useState<string | null>(null);
   const [readAgain, setReadAgain] = useState(false);
   const first = useRef<HTMLInputElement>(null);

@@ -14,7 +14,7 @@ import { answerCommand } from "./answer-command.ts";
 export function LookAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
   const { t } = useTranslation();
   const { state, profile, recordAndGoOn } = useDiagnosis();
-  const { check, node } = task;
+  const { check, node, given } = task;
   const findings = findingsOf(check);
   const inTree = new Set(
     (node?.branches ?? []).flatMap((branch) => (branch.on === "finding" ? [branch.finding] : [])),
@@ -30,7 +30,11 @@ export function LookAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
   return frame(
     <div className="flex flex-col gap-2">
       {!(hasGood && check === "ck-board-status") && (
-        <AnswerButton symbol={<OutcomeMark outcome="good" />} onChoose={() => record({ outcome: "good" })}>
+        <AnswerButton
+          symbol={<OutcomeMark outcome="good" />}
+          chosen={given?.outcome === "good" && !given.finding}
+          onChoose={() => record({ outcome: "good" })}
+        >
           {t([`trade:checks.${check}.zones.good`, "check.allRight"])}
         </AnswerButton>
       )}
@@ -40,6 +44,7 @@ export function LookAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
           <AnswerButton
             key={finding.id}
             symbol={<OutcomeMark outcome={outcome} />}
+            chosen={given?.finding === finding.id}
             onChoose={() => record({ outcome, finding: finding.id })}
           >
             {t(`trade:findings.${check}.${finding.id}`)}
@@ -47,7 +52,11 @@ export function LookAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
         );
       })}
       {findings.length === 0 && (
-        <AnswerButton symbol={<OutcomeMark outcome="fail" />} onChoose={() => record({ outcome: "fail" })}>
+        <AnswerButton
+          symbol={<OutcomeMark outcome="fail" />}
+          chosen={given?.outcome === "fail"}
+          onChoose={() => record({ outcome: "fail" })}
+        >
           {t([`trade:checks.${check}.zones.fail`, "check.notRight"])}
         </AnswerButton>
       )}

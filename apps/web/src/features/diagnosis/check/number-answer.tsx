@@ -27,13 +27,13 @@ import { UnitPicker } from "./unit-picker.tsx";
 export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
   const { t } = useTranslation();
   const { state, profile, recordAndGoOn } = useDiagnosis();
-  const { check, way, node } = task;
+  const { check, way, node, given } = task;
   const definition = getCheck(check);
   const situation = { stage: stageForCheck(check, node?.stage), power: powerOf(state.unit), way };
   const bands = resolveBands(check, profile, situation);
-  const [unit, setUnit] = useState<ReadingUnit>(bands[0]?.unit ?? definition.units[0] ?? "V");
-  const [text, setText] = useState("");
-  const [finding, setFinding] = useState<string | undefined>();
+  const [unit, setUnit] = useState<ReadingUnit>(given?.unit ?? bands[0]?.unit ?? definition.units[0] ?? "V");
+  const [text, setText] = useState(given?.value === undefined ? "" : String(given.value));
+  const [finding, setFinding] = useState<string | undefined>(given?.finding);
   const [error, setError] = useState<string | null>(null);
   const [unlikely, setUnlikely] = useState(false);
   const field = useRef<HTMLInputElement>(null);

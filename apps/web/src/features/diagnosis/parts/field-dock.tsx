@@ -16,7 +16,7 @@ export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: 
     >
       <Link
         to={paths.diagnosis.putBack(diagnosisId)}
-        className="flex items-center justify-center gap-2 text-label leading-4.5 font-medium text-ink no-underline"
+        className="focus-inside flex items-center justify-center gap-2 text-label leading-4.5 font-medium text-ink no-underline"
       >
         <span
           className={`numeric grid size-7 place-items-center rounded border-2 ${out > 0 ? "border-ink bg-ink text-ground" : "border-rule"}`}
@@ -31,7 +31,7 @@ export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: 
       <SavedChip />
       <Link
         to={paths.diagnosis.safety(diagnosisId)}
-        className="grid place-items-center border-2 border-caution-edge bg-caution px-1 text-center text-label leading-4.5 font-semibold text-on-caution no-underline"
+        className="focus-inside grid place-items-center border-2 border-caution-edge bg-caution px-1 text-center text-label leading-4.5 font-semibold text-on-caution no-underline"
       >
         {t("dock.safety")}
       </Link>

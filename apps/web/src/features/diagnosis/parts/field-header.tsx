@@ -11,7 +11,7 @@ export function FieldHeader({ title, subtitle }: { title: string; subtitle: stri
         type="button"
         onClick={() => void navigate(-1)}
         aria-label={t("field.back")}
-        className="grid size-14 shrink-0 place-items-center short:h-13"
+        className="focus-inside grid size-14 shrink-0 place-items-center short:h-13"
       >
         <svg
           viewBox="0 0 24 24"

@@ -14,7 +14,7 @@ export function StopBanner({ diagnosisId, state }: { diagnosisId: string; state:
   return (
     <Link
       to={paths.diagnosis.stop(diagnosisId)}
-      className="flex min-h-12 shrink-0 items-center gap-3 bg-stopped px-4 text-field font-semibold text-on-stopped"
+      className="focus-inside flex min-h-12 shrink-0 items-center gap-3 bg-stopped px-4 text-field font-semibold text-on-stopped"
     >
       {t("stop.banner", { code: STOP_RULE_CODES[stop.rule], count: left })}
     </Link>

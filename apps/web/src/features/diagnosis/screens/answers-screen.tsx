@@ -35,7 +35,7 @@ export function AnswersScreen() {
     id: string;
     what: string;
     value: string;
-    change?: string;
+    change: string;
     outcome?: "good" | "marginal" | "fail";
   }[] = [
     {
@@ -56,6 +56,7 @@ export function AnswersScreen() {
             id: "watch",
             what: t("answers.watch"),
             value: t("field.stoppedAt", { number: stopped.number, count: rungs.length }),
+            change: paths.diagnosis.watch(diagnosisId),
           },
         ]
       : []),
@@ -64,7 +65,7 @@ export function AnswersScreen() {
       what: ofObservation(one).what,
       value: ofObservation(one).value,
       outcome: one.outcome,
-      change: `${paths.diagnosis.check(diagnosisId)}?check=${one.check}`,
+      change: paths.diagnosis.changeCheck(diagnosisId, one.check),
     })),
     ...(state.conclusion
       ? [
@@ -108,14 +109,12 @@ export function AnswersScreen() {
               {row.outcome && <OutcomeMark outcome={row.outcome} />}
               {row.value}
             </dd>
-            {row.change && (
-              <dd className="col-start-2 row-span-2 row-start-1">
-                <Link to={row.change} className="flex min-h-12 min-w-12 items-center justify-end">
-                  {t("answers.change")}
-                  <span className="sr-only">{` ${row.what}`}</span>
-                </Link>
-              </dd>
-            )}
+            <dd className="col-start-2 row-span-2 row-start-1">
+              <Link to={row.change} className="flex min-h-12 min-w-12 items-center justify-end">
+                {t("answers.change")}
+                <span className="sr-only">{` ${row.what}`}</span>
+              </Link>
+            </dd>
           </div>
         ))}
       </dl>

@@ -45,7 +45,7 @@ export function ChecksScreen() {
     .toSorted((a, b) => a.distance - b.distance || a.minutes - b.minutes);
 
   const open = async (check: CheckId) => {
-    await navigate(`${paths.diagnosis.check(diagnosisId)}?check=${check}`);
+    await navigate(paths.diagnosis.check(diagnosisId, check));
   };
   const leave = async (reason: DepartureReason, text?: string) => {
     if (!chosen) return;

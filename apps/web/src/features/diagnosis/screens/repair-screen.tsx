@@ -81,6 +81,7 @@ export function RepairScreen() {
             return (
               <AnswerButton
                 key={repair}
+                chosen={state.repairs.some(({ done }) => done.includes(repair))}
                 onChoose={() => (first ? setChosen(repair) : record(repair))}
                 aside={first ? t("repair.part") : undefined}
               >

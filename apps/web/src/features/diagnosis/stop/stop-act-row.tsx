@@ -38,7 +38,13 @@ export function StopActRow({
     >
       <p className="flex gap-3 text-field">
         <span className="numeric w-6 shrink-0 font-semibold" aria-hidden="true">
-          {act.done ? "\u2713" : number}
+          {act.done ? (
+            <svg viewBox="0 0 24 24" className="size-6">
+              <path d="M5 13l5 5 9-12" fill="none" stroke="currentColor" strokeWidth={3} />
+            </svg>
+          ) : (
+            number
+          )}
         </span>
         <span className={act.done ? "text-quiet" : "font-semibold"}>
           {words}
@@ -76,7 +82,7 @@ function ActInput({
       if (act.check) {
         return (
           <Link
-            to={`${paths.diagnosis.check(diagnosisId)}?check=${act.check}`}
+            to={paths.diagnosis.check(diagnosisId, act.check)}
             className="flex min-h-14 items-center justify-center rounded bg-ink px-4 text-[1.25rem] font-semibold text-ground no-underline"
           >
             {t("stop.takeCheck")}
