@@ -68,13 +68,8 @@ for (const scheme of schemes) {
     await page.setViewportSize({ width: 360, height: 640 });
     await page.goto(`${base}/checks`);
     await take(page, "checks");
-    await page.goto(`${base}/check?check=ck-limit-voltage`);
-    const start = page.getByRole("button", { name: /Call for heat|Power on|Start this check/ });
-    if (await start.count()) await start.first().click();
-    await page.getByLabel("In", { exact: true }).fill("24.6");
-    await page.getByLabel("Out", { exact: true }).fill("0.4");
-    await take(page, "in-out");
-    await page.goto(`${base}/conclude?cause=flame-sensor-dirty`);
+    await page.goto(`${base}/check`);
+    await hands.tap("Done", { exact: true });
     await take(page, "conclude");
     await hands.tap("Record: Flame sensor dirty");
     await take(page, "repair");
@@ -106,7 +101,7 @@ for (const scheme of schemes) {
     await desk.evaluate((chosen) => localStorage.setItem("emberladder.scheme", chosen), scheme);
     await desk.goto("/review");
     await take(desk, "review-list");
-    await desk.getByRole("link", { name: /Call/ }).first().click();
+    await desk.getByRole("main").getByRole("link", { name: /Call/ }).first().click();
     await desk.waitForURL(/review\/.+/);
     await desk.waitForTimeout(800);
     await take(desk, "review", true);

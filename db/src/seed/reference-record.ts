@@ -168,7 +168,7 @@ export function recordOf(call: ReferenceCall, frame: RecordFrame): RecordStep[] 
   for (const step of work) step.run();
   addConclusion();
   addRepair();
-  for (const item of [...openPutBacks(state)]) {
+  for (const item of openPutBacks(state)) {
     if (needsPowerOff(item)) add(lastMinute(), command("unit-state.set", { power: "off" }));
     add(
       lastMinute(),

@@ -1,5 +1,5 @@
 import { displayReading } from "@emberladder/field-math";
-import type { StoredUnit, UnitSystem } from "@emberladder/field-math";
+import type { SiUnit, StoredUnit, UnitSystem } from "@emberladder/field-math";
 
 /** A reading ready to be shown: its figure, and the key of its unit's sign in the message catalogues. */
 export interface ShownReading {
@@ -33,7 +33,12 @@ export function showReading(
   const figure = isOver
     ? "OL"
     : writeFigure(shown.unit === unit ? value : Number(shown.value.toFixed(shown.decimals)));
-  return { figure, unitKey: DESK_SIGNS[shown.unit] ?? `trade:units.${shown.unit}` };
+  return { figure, unitKey: signKeyOf(shown.unit) };
+}
+
+/** The key of a unit's sign in the message catalogues. */
+export function signKeyOf(unit: StoredUnit | SiUnit): string {
+  return DESK_SIGNS[unit] ?? `trade:units.${unit}`;
 }
 
 /** At most three decimals, no trailing zeros, thousands parted so that an input is read at a glance. */

@@ -135,7 +135,7 @@ async function write(
   if (rows.length === 0) return { verdict };
   if (isNew) await insertDiagnosis(tx, row);
   const change = await projectRow(tx, context, { row, before: head, judged });
-  if (!(await moveHead(tx, head, row.id, change))) throw new NeedsCare();
+  if (!(await moveHead(tx, head, row.id, { ...change, newFlags: flags.length }))) throw new NeedsCare();
   await insertEvents(tx, rows);
   await insertFlags(
     tx,

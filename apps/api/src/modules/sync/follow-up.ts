@@ -16,7 +16,15 @@ type Context = RequestContext<Actor>;
 /** The columns of a diagnosis that follow from its events. */
 export type ProjectedRow = Omit<
   DiagnosisRow,
-  "id" | "companyId" | "callId" | "unitId" | "technicianId" | "openedAt" | "isDemo" | "waitsForRelease"
+  | "id"
+  | "companyId"
+  | "callId"
+  | "unitId"
+  | "technicianId"
+  | "openedAt"
+  | "isDemo"
+  | "flags"
+  | "waitsForRelease"
 > &
   // Only set when a report is asked for: afterwards it is a supervisor who ends the waiting.
   Partial<Pick<DiagnosisRow, "waitsForRelease">>;
@@ -44,7 +52,6 @@ export async function projectRow(
     outcome: after.outcome,
     lastStage: after.lastStage,
     closedAt: after.closedAt,
-    flags: row.flags + judged.flags.length,
     wantsReport: after.wantsReport,
     ...waiting,
   };

@@ -48,11 +48,12 @@ export async function moveHead(
   db: Queryable,
   from: { serverSeq: number; chainHash: string },
   diagnosisId: string,
-  change: Partial<typeof diagnoses.$inferInsert>,
+  { newFlags, ...change }: Partial<Omit<DiagnosisRow, "flags">> & { newFlags: number },
 ): Promise<boolean> {
   const [result] = await db
     .update(diagnoses)
-    .set(change)
+    // Counted on in the database: what this process remembers of the count may be old.
+    .set(newFlags === 0 ? change : { ...change, flags: sql`${diagnoses.flags} + ${newFlags}` })
     .where(
       and(
         eq(diagnoses.id, diagnosisId),

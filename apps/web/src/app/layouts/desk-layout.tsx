@@ -23,7 +23,7 @@ export function DeskLayout() {
     <div className="flex min-h-dvh flex-col">
       <a
         href="#content"
-        className="sr-only focus:not-sr-only focus:absolute focus:z-10 focus:bg-surface focus:p-3"
+        className="focus-inside sr-only focus:not-sr-only focus:absolute focus:z-10 focus:bg-surface focus:p-3"
       >
         {t("nav.skip")}
       </a>

@@ -1,6 +1,6 @@
 import { useTranslation } from "react-i18next";
-import { formatNumber } from "#lib/format-number.ts";
 import type { CircuitRung, LoadMark } from "./circuits.ts";
+import { useRungFigures } from "./use-rung-figures.ts";
 
 /** One rung of the full ladder: number, contacts with their names above them, the load, and what was read. */
 export function CircuitRungDrawing({
@@ -17,6 +17,7 @@ export function CircuitRungDrawing({
   isStopped: boolean;
 }) {
   const { t } = useTranslation();
+  const figuresOf = useRungFigures();
   const { rung, contacts, load } = row;
   const lit = rung.state === "proven" || rung.state === "passed";
   const quiet = rung.state === "waiting";
@@ -25,7 +26,6 @@ export function CircuitRungDrawing({
   const gap = (loadX - 40 - from) / Math.max(contacts.length, 1);
   const placed = contacts.map((contact, index) => ({ ...contact, x: from + gap * index + gap / 2 - 10 }));
   const open = placed.at(-1)?.x ?? from;
-  const reading = rung.reading;
   return (
     <g fill="var(--ink)" fontSize={16}>
       <text
@@ -85,14 +85,9 @@ export function CircuitRungDrawing({
       {rung.state === "passed" && (
         <circle cx={left + 36} cy={y} r={5} fill="var(--ground)" stroke="var(--proven)" strokeWidth={2.4} />
       )}
-      {reading && (
+      {rung.reading && (
         <text x={open} y={y + 24} textAnchor="middle" className="numeric" fontWeight={600}>
-          {reading.inV === undefined
-            ? `${reading.value === "OL" ? "OL" : formatNumber(reading.value)} ${t(`trade:units.${reading.unit}`)}`
-            : t("inOut.values", {
-                inV: formatNumber(reading.inV),
-                outV: reading.outV === undefined ? "-" : formatNumber(reading.outV),
-              })}
+          {figuresOf(rung)}
         </text>
       )}
       {isStopped && (

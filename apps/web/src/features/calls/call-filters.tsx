@@ -38,7 +38,7 @@ export function CallFilters({ filter }: { filter: CallFilter }) {
         aria-expanded={isOpen}
         aria-controls="call-filters"
         onClick={() => setOpen(!isOpen)}
-        className="flex min-h-12 w-full items-center gap-3 px-4 text-left text-label text-quiet desk:hidden"
+        className="focus-inside flex min-h-12 w-full items-center gap-3 px-4 text-left text-label text-quiet desk:hidden"
       >
         <svg
           viewBox="0 0 16 16"

@@ -1,6 +1,7 @@
 import type { DiagnosisDetail } from "@emberladder/contract";
 import { useTranslation } from "react-i18next";
-import type { Step } from "./steps-of.ts";
+import { useRuleWords } from "#lib/use-rule-words.ts";
+import type { Step } from "#components/record/steps-of.ts";
 
 /** What a supervisor should know: rules that the record is against, steps left out, the state of the chain. */
 export function FlagList({
@@ -13,6 +14,7 @@ export function FlagList({
   onGo: (to: number) => void;
 }) {
   const { t } = useTranslation();
+  const ruleWords = useRuleWords();
   const departures = steps.filter((step) => step.type === "tree.left" || step.type === "check.declined");
   return (
     <section aria-label={t("review.findings")}>
@@ -28,13 +30,7 @@ export function FlagList({
               key={`${flag.eventId}:${flag.rule}:${index}`}
               className="border-l-6 border-ink bg-surface p-2 text-field desk:text-desk"
             >
-              {t([`rules.${flag.rule}`, `review.flagWords.${flag.rule}`, "rules.unknown"], {
-                ...flag.params,
-                rule: flag.rule,
-                closing: flag.params?.["closing"]
-                  ? t(`trade:closing.${String(flag.params["closing"])}.title`)
-                  : "",
-              })}
+              {ruleWords(flag)}
               {step && (
                 <button
                   type="button"

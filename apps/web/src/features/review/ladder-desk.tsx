@@ -2,6 +2,7 @@ import type { Rung } from "@emberladder/diagnosis";
 import { useTranslation } from "react-i18next";
 import { LadderList } from "#components/ladder/ladder-list.tsx";
 import { RungBar } from "#components/ladder/rung-bar.tsx";
+import { useRungFigures } from "#components/ladder/use-rung-figures.ts";
 import { formatNumber } from "#lib/format-number.ts";
 
 const STEP = 30;
@@ -9,6 +10,7 @@ const STEP = 30;
 /** The ladder beside the record: rails at the left, names and readings in a column at the right. */
 export function LadderDesk({ rungs }: { rungs: readonly Rung[] }) {
   const { t } = useTranslation();
+  const figuresOf = useRungFigures();
   const height = rungs.length * STEP + 16;
   return (
     <div>
@@ -16,12 +18,11 @@ export function LadderDesk({ rungs }: { rungs: readonly Rung[] }) {
         <path d={`M14 4V${height - 4}M112 4V${height - 4}`} stroke="var(--ink)" strokeWidth="var(--rail)" />
         {rungs.map((rung, index) => {
           const y = height - 8 - STEP * (index + 0.5);
-          const { reading } = rung;
           const value =
             rung.state === "stopped"
               ? t("ladder.stoppedLabel")
-              : reading
-                ? `${reading.value === "OL" ? "OL" : formatNumber(reading.value)} ${t(`trade:units.${reading.unit}`)}`
+              : rung.reading
+                ? figuresOf(rung, true)
                 : rung.atS === undefined
                   ? ""
                   : `${formatNumber(rung.atS)} s`;

@@ -11,9 +11,9 @@ import { paths } from "#lib/paths.ts";
 import { FlagList } from "./flag-list.tsx";
 import { LadderDesk } from "./ladder-desk.tsx";
 import { StepDetail } from "./step-detail.tsx";
-import { StepList } from "./step-list.tsx";
+import { StepList } from "#components/record/step-list.tsx";
 import { TimeLine } from "./time-line.tsx";
-import { stepsOf } from "./steps-of.ts";
+import { stepsOf } from "#components/record/steps-of.ts";
 
 /**
  * How a diagnosis was reached, step by step: the time line, the ladder as it stood, what was recorded and what

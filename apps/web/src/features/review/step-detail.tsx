@@ -1,7 +1,7 @@
 import type { DiagnosisDetail } from "@emberladder/contract";
 import { useTranslation } from "react-i18next";
-import type { Step } from "./steps-of.ts";
-import { useStepWords } from "./use-step-words.ts";
+import type { Step } from "#components/record/steps-of.ts";
+import { useStepWords } from "#components/record/use-step-words.ts";
 
 /** One step: what was recorded, in which state of the unit, by whom, and what the screen showed then. */
 export function StepDetail({

@@ -15,24 +15,28 @@ import { BandScale } from "#components/ui/band-scale.tsx";
 import { PrimaryButton } from "#components/ui/button.tsx";
 import { OutcomeMark } from "#components/ui/outcome-mark.tsx";
 import { ReadingField } from "#components/ui/reading-field.tsx";
-import { formatNumber } from "#lib/format-number.ts";
 import { parseReading } from "#lib/parse-reading.ts";
+import { natureOf, useReadingUnits } from "#lib/use-reading-units.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { answerCommand } from "./answer-command.ts";
 import type { CheckTask, Frame } from "./check-page.tsx";
 import { FindingPicker } from "./finding-picker.tsx";
 import { UnitPicker } from "./unit-picker.tsx";
 
-/** A reading: typed, placed on its band, told in words, recorded by a button that names it. */
+/** A reading: typed in the units shown, placed on its band, told in words, recorded by a button that names it. */
 export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame }) {
   const { t } = useTranslation();
   const { state, profile, recordAndGoOn } = useDiagnosis();
   const { check, way, node, given } = task;
+  const readings = useReadingUnits();
+  const nature = natureOf(check);
   const definition = getCheck(check);
   const situation = { stage: stageForCheck(check, node?.stage), power: powerOf(state.unit), way };
   const bands = resolveBands(check, profile, situation);
   const [unit, setUnit] = useState<ReadingUnit>(given?.unit ?? bands[0]?.unit ?? definition.units[0] ?? "V");
-  const [text, setText] = useState(given?.value === undefined ? "" : String(given.value));
+  const [text, setText] = useState(
+    given?.value === undefined ? "" : readings.figureOf(given.value, given.unit ?? unit, nature),
+  );
   const [finding, setFinding] = useState<string | undefined>(given?.finding);
   const [error, setError] = useState<string | null>(null);
   const [unlikely, setUnlikely] = useState(false);
@@ -41,13 +45,21 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
   useEffect(() => field.current?.focus(), []);
 
   const parsed = parseReading(text);
-  const value = parsed.ok ? parsed.value : undefined;
+  const band = bands.find((candidate) => candidate.unit === unit);
+  // From here on in the unit that is recorded; only words and the scale's figures are in the one shown.
+  const value = parsed.ok
+    ? readings.store(
+        parsed.value,
+        unit,
+        nature,
+        band?.segments.map((segment) => segment.from),
+      )
+    : undefined;
   const classified =
     value === undefined ? undefined : classifyReading({ check, value, unit, finding, ...situation }, profile);
-  const band = bands.find((candidate) => candidate.unit === unit);
   const outcome = classified?.outcome;
   const zone = (name: Outcome) => t([`trade:checks.${check}.zones.${name}`, `check.zones.${name}`]);
-  const unitWord = t(`trade:units.${unit}`);
+  const unitWord = readings.signOf(unit, nature);
   const fitting = findingsOf(check).filter(
     (candidate) =>
       !outcome ||
@@ -71,7 +83,11 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
     if (judged === "impossible") {
       const { least, most } = readingLimits(check, unit);
       setError(
-        t("reading.outOfLimits", { least: formatNumber(least), most: formatNumber(most), unit: unitWord }),
+        t("reading.outOfLimits", {
+          least: readings.figureOf(least, unit, nature),
+          most: readings.figureOf(most, unit, nature),
+          unit: unitWord,
+        }),
       );
       field.current?.focus();
       return;
@@ -110,7 +126,12 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
         </p>
       )}
       {definition.units.length > 1 && bands.length !== 1 && (
-        <UnitPicker units={definition.units} chosen={unit} onChoose={setUnit} />
+        <UnitPicker
+          units={definition.units}
+          chosen={unit}
+          onChoose={setUnit}
+          signOf={(one) => readings.signOf(one, nature)}
+        />
       )}
       <ReadingField
         inputRef={field}
@@ -132,7 +153,7 @@ export function NumberAnswer({ task, frame }: { task: CheckTask; frame: Frame })
           segments={band.segments}
           value={value === "OL" ? Infinity : value}
           words={{ good: zone("good"), marginal: zone("marginal"), fail: zone("fail") }}
-          format={formatNumber}
+          format={(edge) => readings.figureOf(edge, unit, nature)}
         />
       )}
       {outcome && (

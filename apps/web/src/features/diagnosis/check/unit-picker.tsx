@@ -6,10 +6,13 @@ export function UnitPicker({
   units,
   chosen,
   onChoose,
+  signOf,
 }: {
   units: readonly ReadingUnit[];
   chosen: ReadingUnit;
   onChoose: (unit: ReadingUnit) => void;
+  /** The sign of a unit as this person sees it. */
+  signOf: (unit: ReadingUnit) => string;
 }) {
   const { t } = useTranslation();
   return (
@@ -27,7 +30,7 @@ export function UnitPicker({
             checked={unit === chosen}
             onChange={() => onChoose(unit)}
           />
-          {t(`trade:units.${unit}`)}
+          {signOf(unit)}
         </label>
       ))}
     </fieldset>

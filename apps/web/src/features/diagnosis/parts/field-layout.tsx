@@ -60,7 +60,7 @@ export function FieldLayout({
           />
         )}
         <main
-          className="focus-inside flex min-w-0 grow flex-col overflow-y-auto"
+          className="focus-inside flex min-w-0 grow scroll-py-3 flex-col overflow-y-auto"
           tabIndex={0}
           aria-label={t("field.step")}
         >

@@ -1,10 +1,12 @@
 import { useEffect, useRef } from "react";
 import { useTranslation } from "react-i18next";
+import { useRuleWords } from "#lib/use-rule-words.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 
 /** Why the last act was not taken: what the rule asks, that nothing was recorded, what to do. */
 export function RefusalNote() {
   const { t } = useTranslation();
+  const ruleWords = useRuleWords();
   const { refusal } = useDiagnosis();
   const note = useRef<HTMLDivElement>(null);
   useEffect(() => {
@@ -20,9 +22,7 @@ export function RefusalNote() {
     >
       <ul className="flex flex-col gap-2">
         {refusal.breaches.map((breach) => (
-          <li key={breach.rule + JSON.stringify(breach.params)}>
-            {t([`rules.${breach.rule}`, "rules.unknown"], { ...breach.params, rule: breach.rule })}
-          </li>
+          <li key={breach.rule + JSON.stringify(breach.params)}>{ruleWords(breach)}</li>
         ))}
       </ul>
       <p className="mt-1 font-normal text-quiet">{t("rules.nothingRecorded")}</p>

@@ -2,6 +2,7 @@ import type { Look, Observation } from "@emberladder/diagnosis";
 import { format } from "date-fns";
 import { useTranslation } from "react-i18next";
 import { formatNumber } from "#lib/format-number.ts";
+import { natureOf, useReadingUnits } from "#lib/use-reading-units.ts";
 
 /** What an answer says, in words: what was taken, its value or finding, the unit's state and the time. */
 export interface AnswerWords {
@@ -18,6 +19,7 @@ export interface AnswerWords {
 /** Words of readings and looks, for lists of evidence and for checking answers. */
 export function useAnswerWords() {
   const { t } = useTranslation();
+  const { write, figureOf } = useReadingUnits();
   const findingWord = (check: string, finding: string) =>
     t([`trade:findings.${check}.${finding}`, `check.findings.${finding}`]);
   const ofObservation = (one: Observation): AnswerWords => {
@@ -27,9 +29,11 @@ export function useAnswerWords() {
             inV: formatNumber(one.inV),
             outV: one.outV === undefined ? "-" : formatNumber(one.outV),
           })
-        : one.value !== undefined
-          ? `${one.value === "OL" ? "OL" : formatNumber(one.value)} ${one.unit ? t(`trade:units.${one.unit}`) : ""}`
-          : "";
+        : one.value === undefined
+          ? ""
+          : one.unit
+            ? write(one.value, one.unit, natureOf(one.check))
+            : figureOf(one.value, "count");
     const finding = one.finding ? findingWord(one.check, one.finding) : "";
     const plain = one.outcome ? t(`check.zones.${one.outcome}`) : "";
     return {

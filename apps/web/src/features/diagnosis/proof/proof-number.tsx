@@ -6,6 +6,7 @@ import { useTranslation } from "react-i18next";
 import { PlainButton } from "#components/ui/button.tsx";
 import { ReadingField } from "#components/ui/reading-field.tsx";
 import { parseReading } from "#lib/parse-reading.ts";
+import { natureOf, useReadingUnits } from "#lib/use-reading-units.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 
 /** Fields that go with a number where this unit or this reading needs them. */
@@ -14,7 +15,7 @@ const ALWAYS_ASKED: Record<string, string[]> = {
   "close-room-co": ["sourceFound", "occupantTold"],
 };
 
-/** A closing check that is a number: typed here, with what has to go with it, recorded by a button that names it. */
+/** A closing check that is a number: typed here in the units shown, with what has to go with it, recorded by a button that names it. */
 export function ProofNumber({ item, stays }: { item: ProofItem; stays: boolean }) {
   const { t } = useTranslation();
   const { profile, record, recordAndGoOn } = useDiagnosis();
@@ -35,9 +36,12 @@ export function ProofNumber({ item, stays }: { item: ProofItem; stays: boolean }
   const [text, setText] = useState("");
   const [also, setAlso] = useState<Record<string, string | boolean>>({});
   const [error, setError] = useState<string | null>(null);
+  const readings = useReadingUnits();
+  const nature = natureOf(item.id);
   const parsed = parseReading(text);
-  const value = parsed.ok && parsed.value !== "OL" ? parsed.value : undefined;
-  const unit = t(`trade:units.${definition.unit}`);
+  const value =
+    parsed.ok && parsed.value !== "OL" ? readings.store(parsed.value, definition.unit, nature) : undefined;
+  const unit = readings.signOf(definition.unit, nature);
 
   const handleRecord = () => {
     if (value === undefined) {
@@ -52,7 +56,7 @@ export function ProofNumber({ item, stays }: { item: ProofItem; stays: boolean }
         continue;
       }
       const number = parseReading(typeof given === "string" ? given : "");
-      if (number.ok && number.value !== "OL") extra[field.id] = number.value;
+      if (number.ok && number.value !== "OL") extra[field.id] = readings.store(number.value, field.unit);
     }
     setError(null);
     void keep([
@@ -96,7 +100,7 @@ export function ProofNumber({ item, stays }: { item: ProofItem; stays: boolean }
             key={field.id}
             compact
             label={t(`proof.also.${field.id}`)}
-            unit={t(`trade:units.${field.unit}`)}
+            unit={readings.signOf(field.unit)}
             text={typeof also[field.id] === "string" ? String(also[field.id]) : ""}
             onChange={(next) => setAlso({ ...also, [field.id]: next })}
           />

@@ -1,17 +1,18 @@
 import type { ProofItem } from "@emberladder/diagnosis";
 import { useTranslation } from "react-i18next";
 import { OutcomeMark } from "#components/ui/outcome-mark.tsx";
-import { formatNumber } from "#lib/format-number.ts";
+import { natureOf, useReadingUnits } from "#lib/use-reading-units.ts";
 import { ProofAct } from "./proof-act.tsx";
 
 /** One closing check: what is wanted in words, the act that records it, and the value once it is read. `stays` keeps the page. */
 export function ProofRow({ item, stays = false }: { item: ProofItem; stays?: boolean }) {
   const { t } = useTranslation();
+  const { write } = useReadingUnits();
   const { reading, verdict } = item;
   const wanted = t(`trade:closing.${item.id}.right`);
   const value =
     reading?.value !== undefined && reading.unit
-      ? `${formatNumber(reading.value)}${reading.unit === "count" ? "" : ` ${t(`trade:units.${reading.unit}`)}`}`
+      ? write(reading.value, reading.unit, natureOf(item.id))
       : reading?.seenRight
         ? t("proof.seen")
         : "";

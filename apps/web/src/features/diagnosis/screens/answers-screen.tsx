@@ -6,6 +6,7 @@ import { Link } from "react-router-dom";
 import { PrimaryButton } from "#components/ui/button.tsx";
 import { OutcomeMark } from "#components/ui/outcome-mark.tsx";
 import { paths } from "#lib/paths.ts";
+import { useRuleWords } from "#lib/use-rule-words.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { FieldLayout } from "../parts/field-layout.tsx";
 import { RefusalNote } from "../parts/refusal-note.tsx";
@@ -21,6 +22,7 @@ export function AnswersScreen() {
   const unitLine = useUnitLine();
   const now = useOpenedAt();
   const { ofObservation, ofLook } = useAnswerWords();
+  const ruleWords = useRuleWords();
   const outcome = likelyOutcome(state);
   const closing: BodyOf<"diagnosis.closed"> = {
     outcome,
@@ -128,15 +130,7 @@ export function AnswersScreen() {
           </h2>
           <ul className="mt-1 flex list-disc flex-col gap-1 pl-5 text-field">
             {missing.map((breach) => (
-              <li key={breach.rule + JSON.stringify(breach.params)}>
-                {t([`rules.${breach.rule}`, "rules.unknown"], {
-                  ...breach.params,
-                  rule: breach.rule,
-                  closing: breach.params?.["closing"]
-                    ? t(`trade:closing.${String(breach.params["closing"])}.title`)
-                    : "",
-                })}
-              </li>
+              <li key={breach.rule + JSON.stringify(breach.params)}>{ruleWords(breach)}</li>
             ))}
           </ul>
         </section>

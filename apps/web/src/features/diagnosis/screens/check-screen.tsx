@@ -2,7 +2,7 @@ import { treePosition } from "@emberladder/diagnosis";
 import { isCheckId } from "@emberladder/furnace";
 import { isAsking } from "@emberladder/trees";
 import type { TreeNode } from "@emberladder/trees";
-import { Navigate, useNavigationType, useSearchParams } from "react-router-dom";
+import { Navigate, NavigationType, useNavigationType, useSearchParams } from "react-router-dom";
 import { paths } from "#lib/paths.ts";
 import { CheckPage } from "../check/check-page.tsx";
 import { DoStep } from "../check/do-step.tsx";
@@ -18,7 +18,7 @@ export function CheckScreen() {
   const { diagnosisId, state, tree } = useDiagnosis();
   const [search] = useSearchParams();
   const chosen = search.get("check");
-  const isSeenAgain = useNavigationType() === "POP" || search.has("change");
+  const isSeenAgain = useNavigationType() === NavigationType.Pop || search.has("change");
   const position = tree ? treePosition(tree, state) : null;
   const node: TreeNode | null = position?.node ?? null;
 

@@ -3,6 +3,7 @@ import { useTranslation } from "react-i18next";
 import { Link } from "react-router-dom";
 import { PrimaryButton } from "#components/ui/button.tsx";
 import { paths } from "#lib/paths.ts";
+import { useFormatReading } from "#lib/use-format-reading.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { FieldLayout } from "../parts/field-layout.tsx";
 import { RefusalNote } from "../parts/refusal-note.tsx";
@@ -13,6 +14,7 @@ export function ConfirmScreen() {
   const { t } = useTranslation();
   const { diagnosisId, state, profile, call, recordAndGoOn } = useDiagnosis();
   const unitLine = useUnitLine();
+  const formatReading = useFormatReading();
   const { codes, plate } = profile;
   const facts = [
     t(`trade:codes.ignition.${codes.ignition}`),
@@ -23,10 +25,15 @@ export function ConfirmScreen() {
     t(`trade:codes.location.${codes.location}`),
   ];
   const figures = [
-    plate.inputBtuh && t("confirm.input", { value: plate.inputBtuh.toLocaleString("en-US") }),
-    plate.switchMakeInwc && t("confirm.switchMake", { value: plate.switchMakeInwc }),
-    plate.riseMinF && plate.riseMaxF && t("confirm.rise", { least: plate.riseMinF, most: plate.riseMaxF }),
-    plate.dropOutUa && t("confirm.dropOut", { value: plate.dropOutUa }),
+    plate.inputBtuh && t("confirm.input", { value: formatReading(plate.inputBtuh, "btuh") }),
+    plate.switchMakeInwc && t("confirm.switchMake", { value: formatReading(plate.switchMakeInwc, "inwc") }),
+    plate.riseMinF &&
+      plate.riseMaxF &&
+      t("confirm.rise", {
+        least: formatReading(plate.riseMinF, "F", { isRise: true }),
+        most: formatReading(plate.riseMaxF, "F", { isRise: true }),
+      }),
+    plate.dropOutUa && t("confirm.dropOut", { value: formatReading(plate.dropOutUa, "uA") }),
   ].filter(Boolean);
   return (
     <FieldLayout

@@ -1,6 +1,6 @@
 import { useTranslation } from "react-i18next";
 import type { Step } from "./steps-of.ts";
-import { StepShape } from "./time-line.tsx";
+import { StepShape } from "./step-shape.tsx";
 import { useStepWords } from "./use-step-words.ts";
 
 /** All steps in their order; what was taken back is struck through and kept. */

@@ -1,19 +1,19 @@
 import type { EventBody } from "@emberladder/diagnosis";
+import type { ReadingUnit } from "@emberladder/furnace";
 import { useTranslation } from "react-i18next";
 import { formatNumber } from "#lib/format-number.ts";
+import { natureOf, useReadingUnits } from "#lib/use-reading-units.ts";
 import type { Step } from "./steps-of.ts";
 
-/** A step in words: what was done, and what it said. */
+/** A step in words: what was done, and what it said, readings in the units shown. */
 export function useStepWords(): (step: Step) => { title: string; value: string } {
   const { t } = useTranslation();
-  const unitWord = (unit: string | undefined) => (unit ? t(`trade:units.${unit}`) : "");
+  const { write, figureOf } = useReadingUnits();
   const finding = (check: string, id: string | undefined) =>
     id ? t([["trade:findings", check, id].join("."), `check.findings.${id}`]) : "";
   const outcome = (value: string | undefined) => (value ? t(`check.zones.${value}`) : "");
-  const number = (value: number | "OL" | undefined, unit: string | undefined) =>
-    value === undefined
-      ? ""
-      : `${value === "OL" ? "OL" : formatNumber(value)} ${unit === "count" ? "" : unitWord(unit)}`.trim();
+  const number = (of: string, value: number | "OL" | undefined, unit: ReadingUnit | undefined) =>
+    value === undefined ? "" : unit ? write(value, unit, natureOf(of)) : figureOf(value, "count");
 
   const words = (event: EventBody): { title: string; value: string } => {
     const title = t(`review.steps.${event.type.replace(".", "-")}`);
@@ -58,7 +58,7 @@ export function useStepWords(): (step: Step) => { title: string; value: string }
         const { check, inV, outV, value, unit } = event.body;
         const reading =
           inV === undefined
-            ? number(value, unit)
+            ? number(check, value, unit)
             : t("inOut.values", {
                 inV: formatNumber(inV),
                 outV: outV === undefined ? "-" : formatNumber(outV),
@@ -86,7 +86,10 @@ export function useStepWords(): (step: Step) => { title: string; value: string }
       case "proof.recorded":
         return {
           title: t(`trade:closing.${event.body.closing}.title`),
-          value: event.body.value === undefined ? t("proof.seen") : number(event.body.value, event.body.unit),
+          value:
+            event.body.value === undefined
+              ? t("proof.seen")
+              : number(event.body.closing, event.body.value, event.body.unit),
         };
       case "diagnosis.closed":
         return { title, value: t(`outcomes.${event.body.outcome}`) };
