@@ -40,7 +40,7 @@ export function sealRecord(
       deviceSeq: device.firstSeq + index,
       type: command.type,
       schemaVersion: 1,
-      body: command.body as Record<string, unknown>,
+      body: command.body,
       occurredAt: start + minute * 60_000,
       tzOffsetMin: TZ_OFFSET_MIN,
       monotonicMs: minute * 60_000 + index,
