@@ -13,6 +13,7 @@ export function useRuleWords(): (breach: Breach) => string {
   const { t } = useTranslation();
   const { figureOf, signOf } = useReadingUnits();
   return ({ rule, params = {} }) => {
+    const closing = params["closing"];
     const unit = params["unit"] as ReadingUnit | undefined;
     // The only check that reads temperatures is the rise.
     const nature = { isDifference: unit === "F" };
@@ -26,7 +27,7 @@ export function useRuleWords(): (breach: Breach) => string {
       ...Object.fromEntries(figures),
       rule,
       ...(unit ? { unit: signOf(unit, nature) } : {}),
-      closing: params["closing"] ? t(`trade:closing.${String(params["closing"])}.title`) : "",
+      closing: typeof closing === "string" ? t(`trade:closing.${closing}.title`) : "",
     };
     return t([`rules.${rule}`, `review.flagWords.${rule}`, "rules.unknown"], values);
   };

@@ -1,6 +1,7 @@
 import type { Rung } from "@emberladder/diagnosis";
 import type { Stage } from "@emberladder/furnace";
 import { useTranslation } from "react-i18next";
+import type { Handedness } from "#lib/handedness.ts";
 import { LadderList } from "./ladder-list.tsx";
 import { RungBar } from "./rung-bar.tsx";
 
@@ -18,6 +19,7 @@ export function LadderStrip({
   notch,
   door,
   stopped,
+  side = "left",
   onOpen,
 }: {
   rungs: readonly Rung[];
@@ -25,6 +27,8 @@ export function LadderStrip({
   /** Door questions under the foot: how many of how many are answered. */
   door?: { answered: number; of: number };
   stopped?: boolean;
+  /** Where it stands; the notch points from the question to its rung. */
+  side?: Handedness;
   onOpen: () => void;
 }) {
   const { t } = useTranslation();
@@ -35,7 +39,7 @@ export function LadderStrip({
     <button
       type="button"
       onClick={onOpen}
-      className="focus-inside relative w-12 shrink-0 border-r-2 border-hair bg-ground p-0"
+      className={`focus-inside relative w-12 shrink-0 border-hair bg-ground p-0 ${side === "right" ? "border-l-2" : "border-r-2"}`}
       aria-label={t("ladder.open")}
     >
       <svg
@@ -51,7 +55,11 @@ export function LadderStrip({
         ))}
         {rungs.map((rung, index) =>
           rung.stage === notch ? (
-            <path key={rung.stage} d={`M47 ${yOf(index) - 7} v14 l-7 -7 z`} fill="var(--ink)" />
+            <path
+              key={rung.stage}
+              d={side === "right" ? `M1 ${yOf(index) - 7} v14 l7 -7 z` : `M47 ${yOf(index) - 7} v14 l-7 -7 z`}
+              fill="var(--ink)"
+            />
           ) : null,
         )}
         {(door || stopped) && (

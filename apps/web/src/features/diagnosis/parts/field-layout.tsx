@@ -5,13 +5,14 @@ import type { ReactNode } from "react";
 import { useTranslation } from "react-i18next";
 import { useNavigate } from "react-router-dom";
 import { LadderStrip } from "#components/ladder/ladder-strip.tsx";
+import { useHandedness } from "#lib/handedness.ts";
 import { paths } from "#lib/paths.ts";
 import { FieldDock } from "./field-dock.tsx";
 import { FieldHeader } from "./field-header.tsx";
 import { StopBanner } from "./stop-banner.tsx";
 
 /**
- * The frame of every field screen: header, the ladder along one side, the question, the pinned act, the dock.
+ * The frame of every field screen: header, the ladder along the side that this person chose, the question, the pinned act, the dock.
  * The heading of the page is the question. `pinned` stays above the dock; a page that is read before it is
  * answered leaves it out and puts its act at the end.
  */
@@ -44,18 +45,20 @@ export function FieldLayout({
 }) {
   const { t } = useTranslation();
   const navigate = useNavigate();
+  const side = useHandedness();
   return (
     <div className="flex h-dvh flex-col bg-ground">
       <FieldHeader title={title} subtitle={subtitle} />
       {!stopped && <StopBanner diagnosisId={diagnosisId} state={state} />}
       {flush}
-      <div className="flex min-h-0 grow">
+      <div className={`flex min-h-0 grow ${side === "right" ? "flex-row-reverse" : ""}`}>
         {strip && (
           <LadderStrip
             rungs={ladderOf(state)}
             notch={notch}
             door={door}
             stopped={stopped}
+            side={side}
             onOpen={() => void navigate(paths.diagnosis.ladder(diagnosisId))}
           />
         )}
