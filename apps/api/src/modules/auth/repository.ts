@@ -111,6 +111,11 @@ export async function touchSession(
   { sessionHash, personId, now }: { sessionHash: string; personId: string; now: Date },
 ): Promise<void> {
   await db.update(sessions).set({ lastUsedAt: now }).where(eq(sessions.id, sessionHash));
+  await markSeen(db, personId, now);
+}
+
+/** Writes when a person was last here. */
+export async function markSeen(db: Queryable, personId: string, now: Date): Promise<void> {
   await db.update(people).set({ lastSeenAt: now }).where(eq(people.id, personId));
 }
 

@@ -4,7 +4,7 @@ import { Lucia, TimeSpan } from "lucia";
 import type { Actor } from "#http/actor.ts";
 import type { Dependencies } from "#http/dependencies.ts";
 import { HashedSessionAdapter, hashSessionToken } from "./hashed-session-adapter.ts";
-import { deleteSession, touchSession } from "./repository.ts";
+import { deleteSession, markSeen, touchSession } from "./repository.ts";
 import { judgeSession, sessionLimitsOf } from "./session-limits.ts";
 
 /** The one cookie of the product. `__Host-` binds it to this host, to TLS and to every path. */
@@ -122,6 +122,8 @@ export function createSessionKeeper({
         twoStepPassed,
         endsAt,
       });
+      // A password alone does not show who is here where a code is still owed.
+      if (twoStepPassed) await markSeen(database, personId, now);
       const cookie = lucia.createSessionCookie(session.id);
       cookie.attributes.maxAge = Math.floor(sessionLimitsOf(role).absoluteMs / 1000);
       return { cookie: cookie.serialize(), sessionHash: hashSessionToken(session.id) };
