@@ -10,11 +10,13 @@ import { gasChecks } from "./gas-checks.ts";
 import { ignitionChecks } from "./ignition-checks.ts";
 import type { Opening } from "./openings.ts";
 import { supplyChecks } from "./supply-checks.ts";
+import { ventChecks } from "./vent-checks.ts";
 
 const entries: Record<CheckId, CheckEntry> = {
   ...supplyChecks,
   ...callChecks,
   ...draftChecks,
+  ...ventChecks,
   ...ignitionChecks,
   ...gasChecks,
   ...airChecks,

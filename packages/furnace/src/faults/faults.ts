@@ -3,6 +3,7 @@ import { onLadder } from "../stages.ts";
 import { evaluateVariant, mayApply } from "../variant.ts";
 import type { VariantContext } from "../variant.ts";
 import { airFaults } from "./air-faults.ts";
+import { controlFaults } from "./control-faults.ts";
 import { draftFaults } from "./draft-faults.ts";
 import { FAULT_IDS } from "./fault-ids.ts";
 import type { FaultId } from "./fault-ids.ts";
@@ -17,6 +18,7 @@ import type { RepairId } from "./repair-ids.ts";
 
 const entries: Record<FaultId, FaultEntry> = {
   ...powerFaults,
+  ...controlFaults,
   ...limitFaults,
   ...draftFaults,
   ...ignitionFaults,

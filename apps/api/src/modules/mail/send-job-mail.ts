@@ -2,7 +2,7 @@ import { INVITE_DAYS, REPORT_LINK_DAYS, reportContentSchema, RESET_HOURS } from 
 import { LINK_LIFE_MS } from "#modules/auth/account-links.ts";
 import { insertLink } from "#modules/auth/links/repository.ts";
 import { hashSecret, makeToken } from "#modules/auth/secrets.ts";
-import type { JobContext } from "#modules/jobs/job-handlers.ts";
+import type { JobContext } from "#modules/jobs/job-context.ts";
 import { findReport, findReportSubject, insertReportLink } from "#modules/reports/repository.ts";
 import { formatDay, formatMoment } from "./format-moment.ts";
 import { callAssignedMessage, inviteMessage, reportMessage, resetMessage } from "./messages.ts";

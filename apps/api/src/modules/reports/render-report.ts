@@ -2,7 +2,7 @@ import { mkdir, rename, writeFile } from "node:fs/promises";
 import { join } from "node:path";
 import { inTransaction } from "@emberladder/db";
 import { fold } from "@emberladder/diagnosis";
-import type { JobContext } from "#modules/jobs/job-handlers.ts";
+import type { JobContext } from "#modules/jobs/job-context.ts";
 import { enqueueJob } from "#modules/jobs/repository.ts";
 import { listEventsOf, readStoredEvent } from "#modules/sync/repository.ts";
 import { buildReportContent } from "./build-report-content.ts";

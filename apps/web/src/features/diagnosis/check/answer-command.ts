@@ -2,7 +2,7 @@ import { command, powerOf, stageForCheck } from "@emberladder/diagnosis";
 import type { BodyOf, Command, DiagnosisState } from "@emberladder/diagnosis";
 import { CATALOGUE_VERSION } from "@emberladder/furnace";
 import type { Outcome, ReadingUnit, UnitProfile } from "@emberladder/furnace";
-import type { CheckTask } from "./check-page.tsx";
+import type { CheckTask } from "./check-task.ts";
 
 export interface GivenAnswer {
   outcome?: Outcome;

@@ -10,7 +10,7 @@ import { useDiagnosis } from "../diagnosis-context.tsx";
 import { FieldLayout } from "../parts/field-layout.tsx";
 import { RefusalNote } from "../parts/refusal-note.tsx";
 import { useClimbLine, useUnitLine } from "../parts/use-unit-line.ts";
-import type { CheckTask } from "./check-page.tsx";
+import type { CheckTask } from "./check-task.ts";
 
 /** Why a check is not taken: one tap from the list; only "other" is typed. The walk goes on without it. */
 export function CannotDo({ task, onBack }: { task: CheckTask; onBack: () => void }) {

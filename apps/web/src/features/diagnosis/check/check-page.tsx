@@ -13,6 +13,7 @@ import { RefusalNote } from "../parts/refusal-note.tsx";
 import { UndoLine } from "../parts/undo-line.tsx";
 import { useClimbLine, useUnitLine } from "../parts/use-unit-line.ts";
 import { InOutAnswer } from "./in-out-answer.tsx";
+import type { CheckTask, Frame } from "./check-task.ts";
 import { CannotDo } from "./cannot-do.tsx";
 import { LookAnswer } from "./look-answer.tsx";
 import { NumberAnswer } from "./number-answer.tsx";
@@ -20,15 +21,6 @@ import { rungOfCheck } from "./rung-of-check.ts";
 import { StartCheck } from "./start-check.tsx";
 import { UnitStateBar } from "./unit-state-bar.tsx";
 import { worstHazards } from "./worst-hazards.ts";
-
-/** What a check's answer panel needs. */
-export interface CheckTask {
-  check: CheckId;
-  node: AskingNode | undefined;
-  way: string | undefined;
-  /** What was recorded here before, filled in; undefined where the check is to be taken. */
-  given: Observation | undefined;
-}
 
 /**
  * One check on one page: hazard, instruction, state of the unit, the answer, what it means, the act. A check
@@ -144,5 +136,3 @@ function panelOf(reading: Panel, way: string | undefined): Panel {
   if (way === "ohms" || way === "fuse-out-ohms") return "number";
   return reading;
 }
-
-export type Frame = (content: React.ReactNode, pinned?: React.ReactNode) => React.ReactNode;

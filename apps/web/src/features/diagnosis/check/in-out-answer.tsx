@@ -8,7 +8,7 @@ import { ReadingField } from "#components/ui/reading-field.tsx";
 import { parseReading } from "#lib/parse-reading.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { answerCommand } from "./answer-command.ts";
-import type { CheckTask, Frame } from "./check-page.tsx";
+import type { CheckTask, Frame } from "./check-task.ts";
 import { ContactDrawing } from "./contact-drawing.tsx";
 import { FindingPicker } from "./finding-picker.tsx";
 

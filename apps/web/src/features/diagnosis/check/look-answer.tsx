@@ -4,7 +4,7 @@ import { useTranslation } from "react-i18next";
 import { AnswerButton } from "#components/ui/answer-button.tsx";
 import { OutcomeMark } from "#components/ui/outcome-mark.tsx";
 import { useDiagnosis } from "../diagnosis-context.tsx";
-import type { CheckTask, Frame } from "./check-page.tsx";
+import type { CheckTask, Frame } from "./check-task.ts";
 import { answerCommand } from "./answer-command.ts";
 
 /**

@@ -19,7 +19,7 @@ import { parseReading } from "#lib/parse-reading.ts";
 import { natureOf, useReadingUnits } from "#lib/use-reading-units.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { answerCommand } from "./answer-command.ts";
-import type { CheckTask, Frame } from "./check-page.tsx";
+import type { CheckTask, Frame } from "./check-task.ts";
 import { FindingPicker } from "./finding-picker.tsx";
 import { UnitPicker } from "./unit-picker.tsx";
 

@@ -4,7 +4,7 @@ import { getCheck } from "@emberladder/furnace";
 import { useTranslation } from "react-i18next";
 import { AnswerButton } from "#components/ui/answer-button.tsx";
 import { useDiagnosis } from "../diagnosis-context.tsx";
-import type { CheckTask } from "./check-page.tsx";
+import type { CheckTask } from "./check-task.ts";
 
 /**
  * Starts a check: one button a way of taking it, whose label says what changes on the unit and what comes off.
