@@ -1,4 +1,3 @@
-import type { DiagnosisDetail } from "@emberladder/contract";
 import { parseBody } from "@emberladder/diagnosis";
 import type { EventBody } from "@emberladder/diagnosis";
 import { format } from "date-fns";
@@ -16,7 +15,22 @@ export type StepMark =
   | "stop"
   | "other";
 
-/** One event of a record as the review shows it. */
+/** A record as the server sends it or as this phone keeps it; who made an event is known once it was received. */
+export interface RecordOfSteps {
+  events: readonly {
+    id: string;
+    type: string;
+    schemaVersion: number;
+    body: Record<string, unknown>;
+    occurredAt: number;
+    serverOffsetMs: number | null;
+    deviceId: string;
+    actorId?: string;
+  }[];
+  people: readonly { id: string; name: string }[];
+}
+
+/** One event of a record as it is shown. */
 export interface Step {
   number: number;
   id: string;
@@ -58,7 +72,7 @@ const MARKS: Record<string, StepMark> = {
 const FIVE_MINUTES = 300_000;
 
 /** The events of a record in their order, ready to be shown. */
-export function stepsOf(record: DiagnosisDetail): Step[] {
+export function stepsOf(record: RecordOfSteps): Step[] {
   const names = new Map(record.people.map((person) => [person.id, person.name]));
   const undone = new Set(
     record.events.flatMap((event) =>
@@ -75,7 +89,7 @@ export function stepsOf(record: DiagnosisDetail): Step[] {
       at: event.occurredAt,
       time: format(event.occurredAt, "HH:mm:ss"),
       mark: MARKS[event.type] ?? "other",
-      actorName: names.get(event.actorId) ?? "",
+      actorName: names.get(event.actorId ?? "") ?? "",
       deviceId: event.deviceId,
       undone: undone.has(event.id),
       clockOff: event.serverOffsetMs !== null && Math.abs(event.serverOffsetMs) > FIVE_MINUTES,

@@ -16,6 +16,7 @@ import { paths } from "#lib/paths.ts";
 import { useMe, useSession } from "#lib/session.tsx";
 import { formatDay, formatLongDay, formatMoment, formatTime, zoneName } from "#lib/site-time.ts";
 import { useAct } from "#lib/use-act.ts";
+import { useRecordPath } from "#lib/use-record-path.ts";
 import { useTradeWords } from "#lib/use-trade-words.ts";
 import { AssignCall } from "./assign-call.tsx";
 import { CancelCall } from "./cancel-call.tsx";
@@ -41,6 +42,7 @@ function CallPage({ call, isKept }: { call: CallDetail; isKept: boolean }) {
   const { t } = useTranslation();
   const { can } = useSession();
   const hasTradeWords = useTradeWords();
+  const recordPath = useRecordPath();
   const { site, unit, timeZone, scheduledFor } = call;
   const isRoof = unit.profile.codes.location === "RTU";
   return (
@@ -68,7 +70,7 @@ function CallPage({ call, isKept }: { call: CallDetail; isKept: boolean }) {
               <div>
                 <ShutOffLabel record={call.openShutOff} timeZone={timeZone} />
                 <Link
-                  to={paths.reviewOf(call.openShutOff.diagnosisId)}
+                  to={recordPath(call.openShutOff.diagnosisId)}
                   className="inline-flex min-h-12 items-center text-field font-medium desk:text-desk"
                 >
                   {t("desk:shutOff.read")}
@@ -125,7 +127,7 @@ function CallPage({ call, isKept }: { call: CallDetail; isKept: boolean }) {
                 {call.diagnoses.map((diagnosis) => (
                   <li key={diagnosis.id} className="border-b border-hair last:border-b-0">
                     <Link
-                      to={paths.reviewOf(diagnosis.id)}
+                      to={recordPath(diagnosis.id)}
                       className="flex min-h-12 flex-wrap items-center gap-x-3 text-field desk:text-desk"
                     >
                       <span className="numeric">{formatDay(diagnosis.openedAt, timeZone)}</span>

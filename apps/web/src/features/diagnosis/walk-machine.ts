@@ -52,7 +52,7 @@ const PATH_OF_STEP: Record<WalkStep, (diagnosisId: string) => string> = {
 };
 
 /** Screens that stay open while a stop rule is: its own, the ways to end, and what only shows. */
-const OPEN_WHILE_STOPPED = ["stop", "close", "safety", "ladder", "put-back", "check", "checks"];
+const OPEN_WHILE_STOPPED = ["stop", "close", "safety", "ladder", "record", "put-back", "check", "checks"];
 
 /** Whether a screen gives way to the stop screen. */
 export function givesWayToStop(screen: string): boolean {

@@ -3,8 +3,8 @@ import { useTranslation } from "react-i18next";
 import { Link } from "react-router-dom";
 import type { Column } from "#components/tables/build-table.ts";
 import { DataTable } from "#components/tables/data-table.tsx";
-import { paths } from "#lib/paths.ts";
 import { formatMoment } from "#lib/site-time.ts";
+import { useRecordPath } from "#lib/use-record-path.ts";
 
 /** Every diagnosis on a unit: when, by whom, how it ended. */
 export function HistoryTable({
@@ -17,6 +17,7 @@ export function HistoryTable({
   timeZone: string;
 }) {
   const { t } = useTranslation();
+  const recordPath = useRecordPath();
   const columns: Column<DiagnosisSummary>[] = [
     {
       id: "opened",
@@ -24,7 +25,7 @@ export function HistoryTable({
       value: (row) => row.openedAt,
       renderCell: (row) => (
         <Link
-          to={paths.reviewOf(row.id)}
+          to={recordPath(row.id)}
           className="numeric inline-flex min-h-12 items-center whitespace-nowrap desk:min-h-9"
         >
           {formatMoment(row.openedAt, timeZone)}

@@ -12,6 +12,7 @@ import { useKeptQuery } from "#lib/kept-query.ts";
 import { paths } from "#lib/paths.ts";
 import { useMe, useSession } from "#lib/session.tsx";
 import { formatMoment } from "#lib/site-time.ts";
+import { useRecordPath } from "#lib/use-record-path.ts";
 import { BandList } from "./band-list.tsx";
 import { ChainList } from "./chain-list.tsx";
 import { HistoryTable } from "./history-table.tsx";
@@ -38,6 +39,7 @@ function UnitPage({ unit }: { unit: UnitDetail }) {
   const { t } = useTranslation();
   const { can } = useSession();
   const { company } = useMe();
+  const recordPath = useRecordPath();
   const { profile, site } = unit;
   const timeZone = site.timeZone ?? company.timeZone;
   return (
@@ -63,7 +65,7 @@ function UnitPage({ unit }: { unit: UnitDetail }) {
         <div className="px-4 py-3 desk:px-6">
           <ShutOffLabel record={unit.openShutOff} timeZone={timeZone} />
           <Link
-            to={paths.reviewOf(unit.openShutOff.diagnosisId)}
+            to={recordPath(unit.openShutOff.diagnosisId)}
             className="inline-flex min-h-12 items-center text-field font-medium desk:text-desk"
           >
             {t("desk:shutOff.read")}

@@ -56,6 +56,8 @@ export const review = {
   backStep: "Back a step",
   nextStep: "Next step",
   allSteps: "All steps",
+  recordHeader: "What was done",
+  recordOpen: "Still under way.",
   findings: "Findings",
   noFindings: "No rule was broken, and the tree was followed.",
   toStep: "Step {{number}}",
