@@ -35,6 +35,8 @@ export function lastWatch(state: DiagnosisState): Watch | undefined {
 /** The last stage this call completed; `any` where nothing was watched. */
 export function lastStageOf(state: DiagnosisState): LastStage {
   const watch = lastWatch(state);
+  // A dead unit is not watched: nothing was completed, and that is known.
+  if (state.profile && !watch && state.watchSkipped?.why === "no-power") return "none";
   if (!state.profile || !watch) return "any";
   return lastStageOfWatch(state.profile, {
     seen: watch.seen,
@@ -71,7 +73,8 @@ export function ladderOf(state: DiagnosisState): Rung[] {
       ...(seen === undefined ? {} : { atS: seen }),
       ...readingOf(reading),
     };
-    const stopped = watch !== undefined && !running && index === reached + 1 && last !== "satisfied";
+    const stopped =
+      (watch !== undefined || last === "none") && !running && index === reached + 1 && last !== "satisfied";
     return {
       ...base,
       litToGap: stopped && (reading?.inV ?? 0) >= CLOSED_CONTACT_V,

@@ -40,7 +40,7 @@ function OpenDiagnosis({ loaded }: { loaded: LoadedDiagnosis }) {
   const state = useSyncExternalStore(session.subscribe, session.getState);
   const [refusal, setRefusal] = useState<Refusal | null>(null);
   const navigate = useNavigate();
-  const { pathname } = useLocation();
+  const { pathname, search } = useLocation();
   const [openedAt] = useState(() => Date.now());
   const step = stepOf(state, tree, openedAt);
   const [walk, send] = useMachine(walkMachine, { input: { step } });
@@ -63,9 +63,14 @@ function OpenDiagnosis({ loaded }: { loaded: LoadedDiagnosis }) {
   const recordAndGoOn = useCallback(
     async (commands: readonly Command[], notes?: readonly NoteText[]) => {
       const next = await record(commands, notes);
-      if (next) await navigate(pathOfNext(diagnosisId, next, tree));
+      if (!next) return;
+      const to = pathOfNext(diagnosisId, next, tree);
+      // A page that stays, as the door does between its questions, is one step back and not three. An act of the
+      // tree is no question: once done there is nothing to come back to.
+      const isDoStep = pathname === paths.diagnosis.check(diagnosisId) && search === "";
+      await navigate(to, { replace: isDoStep || to === pathname + search });
     },
-    [record, navigate, diagnosisId, tree],
+    [record, navigate, diagnosisId, tree, pathname, search],
   );
   const { profile } = state;
   const work = useMemo<DiagnosisWork | null>(

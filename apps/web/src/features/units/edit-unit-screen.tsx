@@ -1,7 +1,7 @@
 import { readUnit, updateUnit } from "@emberladder/contract";
 import { useQuery, useQueryClient } from "@tanstack/react-query";
 import { useTranslation } from "react-i18next";
-import { useNavigate, useParams } from "react-router-dom";
+import { useNavigate, useParams, useSearchParams } from "react-router-dom";
 import { LoadingNote, ProblemNote } from "#components/ui/list-states.tsx";
 import { PageHead } from "#components/ui/page-head.tsx";
 import { callApi } from "#lib/api-client.ts";
@@ -14,6 +14,10 @@ export function EditUnitScreen() {
   const { t } = useTranslation();
   const { unitId = "" } = useParams();
   const navigate = useNavigate();
+  const [search] = useSearchParams();
+  // Opened from a visit: back to it, where the corrected unit is confirmed and recorded.
+  const diagnosisId = search.get("diagnosis");
+  const backTo = diagnosisId ? paths.diagnosis.confirm(diagnosisId) : paths.unit(unitId);
   const client = useQueryClient();
   const unit = useQuery({
     queryKey: ["unit-to-edit", unitId],
@@ -29,11 +33,11 @@ export function EditUnitScreen() {
   const save = async (changed: UnitDraft) => {
     await callApi(updateUnit, { params: { unitId }, body: { version, ...changed } });
     await client.invalidateQueries();
-    await navigate(paths.unit(unitId), { replace: true });
+    await navigate(backTo, { replace: true });
   };
   return (
     <>
-      <PageHead back={{ to: paths.unit(unitId), label: name }} title={t("desk:unit.editTitle", { name })} />
+      <PageHead back={{ to: backTo, label: name }} title={t("desk:unit.editTitle", { name })} />
       <UnitForm draft={{ name, profile }} submitLabel={t("desk:unit.save")} onSubmit={save} />
     </>
   );

@@ -3,6 +3,7 @@ import { useTranslation } from "react-i18next";
 import { Link } from "react-router-dom";
 import { PrimaryButton } from "#components/ui/button.tsx";
 import { paths } from "#lib/paths.ts";
+import { useCorrectedProfile } from "../parts/use-corrected-profile.ts";
 import { useFormatReading } from "#lib/use-format-reading.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { FieldLayout } from "../parts/field-layout.tsx";
@@ -12,7 +13,9 @@ import { useUnitLine } from "../parts/use-unit-line.ts";
 /** Complaint and unit as they came with the call: right in one tap, or the unit corrected from its plate. */
 export function ConfirmScreen() {
   const { t } = useTranslation();
-  const { diagnosisId, state, profile, call, recordAndGoOn } = useDiagnosis();
+  const { diagnosisId, state, profile: pinned, call, recordAndGoOn } = useDiagnosis();
+  const corrected = useCorrectedProfile(call?.unit.id, pinned);
+  const profile = corrected ?? pinned;
   const unitLine = useUnitLine();
   const formatReading = useFormatReading();
   const { codes, plate } = profile;
@@ -42,13 +45,22 @@ export function ConfirmScreen() {
       title={t("confirm.header")}
       subtitle={unitLine}
       pinned={
-        <PrimaryButton onClick={() => void recordAndGoOn([command("unit.confirmed", {})])}>
+        <PrimaryButton
+          onClick={() =>
+            void recordAndGoOn([command("unit.confirmed", corrected ? { profile: corrected } : {})])
+          }
+        >
           {t("confirm.right")}
         </PrimaryButton>
       }
     >
       <h1 className="text-question">{t("confirm.title")}</h1>
       <RefusalNote />
+      {corrected && (
+        <p role="status" className="border-l-6 border-ink bg-surface p-3 text-field font-semibold">
+          {t("confirm.corrected")}
+        </p>
+      )}
       {call && (
         <blockquote className="border-l-6 border-ink bg-surface p-3 text-field">
           <p>{call.complaint}</p>

@@ -5,7 +5,7 @@ import type { FirstLookHit, FirstLookItem } from "@emberladder/furnace";
 import { useState } from "react";
 import { useTranslation } from "react-i18next";
 import { useNavigate } from "react-router-dom";
-import { PrimaryButton } from "#components/ui/button.tsx";
+import { LinkButton, PrimaryButton } from "#components/ui/button.tsx";
 import { paths } from "#lib/paths.ts";
 import { useDiagnosis } from "../diagnosis-context.tsx";
 import { AtUnitQuestions } from "../look/at-unit-questions.tsx";
@@ -79,6 +79,14 @@ export function LookScreen() {
           onHit={() => setOpen("at-unit")}
         />
       </ul>
+      <div className="flex flex-wrap gap-x-6">
+        <LinkButton onClick={() => void recordAndGoOn([command("watch.skipped", { why: "no-power" })])}>
+          {t("look.dead")}
+        </LinkButton>
+        <LinkButton onClick={() => void recordAndGoOn([command("watch.skipped", { why: "not-safe" })])}>
+          {t("look.noWatch")}
+        </LinkButton>
+      </div>
       <UndoLine />
     </FieldLayout>
   );
