@@ -59,8 +59,13 @@ export function isDatabaseAway(error: unknown): boolean {
   if (found) return AWAY_CODES.has(found.code);
   let current: unknown = error;
   for (let depth = 0; depth < 4 && current instanceof Error; depth += 1) {
-    // The pool's own two refusals carry no code.
-    if (/^(Queue limit reached|Pool is closed|No connections available)/.test(current.message)) return true;
+    // The driver's own refusals carry no code. The last is what undoing a transaction meets on a broken connection.
+    if (
+      /^(Queue limit reached|Pool is closed|No connections available|Can't add new command)/.test(
+        current.message,
+      )
+    )
+      return true;
     current = current.cause;
   }
   return false;
