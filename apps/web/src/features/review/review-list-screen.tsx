@@ -1,12 +1,13 @@
 import { listDiagnoses } from "@emberladder/contract";
 import type { DiagnosisSummary } from "@emberladder/contract";
 import { useQuery } from "@tanstack/react-query";
-import { format } from "date-fns";
 import { useTranslation } from "react-i18next";
 import { Link, useSearchParams } from "react-router-dom";
 import { ColdLadderDrawing } from "#components/ladder/drawings.tsx";
 import { callApi } from "#lib/api-client.ts";
 import { paths } from "#lib/paths.ts";
+import { useMe } from "#lib/session.tsx";
+import { formatMoment } from "#lib/site-time.ts";
 
 const FILTERS = ["all", "flagged", "open", "closed"] as const;
 type Filter = (typeof FILTERS)[number];
@@ -91,6 +92,7 @@ export function ReviewListScreen() {
 
 function ReviewRow({ item }: { item: DiagnosisSummary }) {
   const { t } = useTranslation();
+  const { timeZone } = useMe().company;
   const outcome = item.outcome ? t(`outcomes.${item.outcome}`) : t("review.open");
   return (
     <li>
@@ -103,7 +105,7 @@ function ReviewRow({ item }: { item: DiagnosisSummary }) {
           {item.isDemo && <span className="ml-2 font-normal text-quiet">{t("review.invented")}</span>}
         </span>
         <span className="numeric text-label text-quiet desk:text-small">
-          {format(new Date(item.openedAt), "d MMM yyyy HH:mm")}
+          {formatMoment(item.openedAt, timeZone)}
         </span>
         <span className="text-field text-quiet desk:text-desk">
           {t("review.who", { name: item.technician.name, outcome })}
