@@ -101,8 +101,16 @@ for (const scheme of schemes) {
     await desk.evaluate((chosen) => localStorage.setItem("emberladder.scheme", chosen), scheme);
     await desk.goto("/review");
     await take(desk, "review-list");
-    await desk.getByRole("main").getByRole("link", { name: /Call/ }).first().click();
+    await desk
+      .getByRole("main")
+      .getByRole("link", { name: /Call 1081/ })
+      .first()
+      .click();
     await desk.waitForURL(/review\/.+/);
+    await desk
+      .getByRole("button", { name: /Read the flame signal/ })
+      .first()
+      .click();
     await desk.waitForTimeout(800);
     await take(desk, "review", true);
     for (const path of ["calls", "customers", "team", "settings", "account"]) {
