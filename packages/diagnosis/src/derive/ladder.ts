@@ -71,7 +71,8 @@ export function ladderOf(state: DiagnosisState): Rung[] {
       stage,
       number: index + 1,
       ...(seen === undefined ? {} : { atS: seen }),
-      ...readingOf(reading),
+      // After the light-off proof a reading that failed before the repair says nothing of the unit any more.
+      ...readingOf(cycled && reading?.outcome !== "good" ? undefined : reading),
     };
     const stopped =
       (watch !== undefined || last === "none") && !running && index === reached + 1 && last !== "satisfied";
