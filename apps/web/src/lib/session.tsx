@@ -64,6 +64,20 @@ export function SessionProvider({ children }: { children: ReactNode }) {
   return <SessionContext.Provider value={session}>{children}</SessionContext.Provider>;
 }
 
+/**
+ * Lets what is below go on as the person who was on the page, while their session has ended and they are asked to
+ * sign in again: nothing they typed is lost. The server refuses whatever it is asked meanwhile.
+ */
+export function HeldSession({ me, children }: { me: Me; children: ReactNode }) {
+  const session = useSession();
+  const held = useMemo<Session>(
+    () =>
+      session.me === me ? session : { ...session, me, can: (permission) => can(me.person.role, permission) },
+    [session, me],
+  );
+  return <SessionContext.Provider value={held}>{children}</SessionContext.Provider>;
+}
+
 /** The session; only below `SessionProvider`. */
 export function useSession(): Session {
   const session = useContext(SessionContext);

@@ -4,7 +4,9 @@ import { FormProvider, useForm } from "react-hook-form";
 import type { DefaultValues, FieldPath, FieldValues } from "react-hook-form";
 import { useTranslation } from "react-i18next";
 import { ApiProblem } from "#lib/api-client.ts";
+import { markHalfTyped } from "#lib/half-typed.ts";
 import { useProblemWords } from "#lib/problem-words.ts";
+import { askToSignIn } from "#lib/sign-in-again.ts";
 import { ErrorSummary } from "./error-summary.tsx";
 import { listErrors } from "./list-errors.ts";
 import { resolveBy } from "./resolve-by.ts";
@@ -23,7 +25,8 @@ export function useControlId(name: string): string {
  * A form as the whole product has it: judged by a contract's schema when it is sent and never before, so that
  * nobody is told off while typing. What was typed stays. Where something has to be mended, a summary comes on
  * top with the focus and a link to each field, each field says it too, and the page's title begins with the
- * word for error. Refusals of the server land in the same places. A second tap while sending does nothing.
+ * word for error. Refusals of the server land in the same places. A second tap while sending does nothing. Where
+ * the session has ended, the person signs in again over the page, and the form is sent then.
  */
 export function Form<Input extends FieldValues, Output>({
   schema,
@@ -31,6 +34,7 @@ export function Form<Input extends FieldValues, Output>({
   submitLabel,
   onSubmit,
   submitKind = "solid",
+  isForSignIn = false,
   aside,
   children,
 }: {
@@ -43,6 +47,8 @@ export function Form<Input extends FieldValues, Output>({
   onSubmit: (values: Output) => Promise<void>;
   /** Plain where the screen has its one solid act elsewhere. */
   submitKind?: "solid" | "plain";
+  /** Set where it is how people sign in, so that nobody is asked to sign in for it. */
+  isForSignIn?: boolean;
   /** Second acts beside the button. */
   aside?: ReactNode;
   children: ReactNode;
@@ -63,11 +69,16 @@ export function Form<Input extends FieldValues, Output>({
   });
   const errors = listErrors(form.formState.errors);
   const hasErrors = errors.length > 0;
+  const isHalfTyped = form.formState.isDirty && !isForSignIn;
 
   useEffect(() => {
     // A failed fetch is tried again, and told, when the form is sent.
     if (typeof schema === "function") void schema().catch(() => undefined);
   }, [schema]);
+  useEffect(() => {
+    markHalfTyped(formId, isHalfTyped);
+    return () => markHalfTyped(formId, false);
+  }, [formId, isHalfTyped]);
   useEffect(() => {
     // The errors are drawn in one of the renders after they were found, so the focus waits for them.
     if (!isFocusDue.current || !summary.current) return;
@@ -102,7 +113,10 @@ export function Form<Input extends FieldValues, Output>({
       },
     );
     try {
-      await send();
+      await send().catch(async (problem: unknown) => {
+        if (isForSignIn || !isSignedOut(problem) || !(await askToSignIn())) throw problem;
+        await send();
+      });
     } catch (problem) {
       showProblem(problem);
     } finally {
@@ -134,4 +148,8 @@ export function Form<Input extends FieldValues, Output>({
       </FormProvider>
     </FormIdContext>
   );
+}
+
+function isSignedOut(problem: unknown): boolean {
+  return problem instanceof ApiProblem && problem.code === "signed-out";
 }

@@ -1,5 +1,5 @@
 import { recoveryCodeField, signOut, twoStepCodeField, verifyTwoStep } from "@emberladder/contract";
-import type { BodyOf } from "@emberladder/contract";
+import type { BodyOf, Me } from "@emberladder/contract";
 import { useQueryClient } from "@tanstack/react-query";
 import { useState } from "react";
 import { useTranslation } from "react-i18next";
@@ -13,13 +13,19 @@ import { enterSession, leaveSession } from "#lib/enter-session.ts";
 const codeSchema = z.strictObject({ code: twoStepCodeField });
 const recoverySchema = z.strictObject({ recoveryCode: recoveryCodeField });
 
-/** The code of the authenticator, or a recovery code where it is lost. */
-export function CodeStep() {
+/**
+ * The code of the authenticator, or a recovery code where it is lost. `onVerified` takes the session over;
+ * without it a new session begins.
+ */
+export function CodeStep({ onVerified }: { onVerified?: (me: Me) => void }) {
   const { t } = useTranslation();
   const client = useQueryClient();
   const [usesRecovery, setUsesRecovery] = useState(false);
-  const verify = async (body: BodyOf<typeof verifyTwoStep>) =>
-    enterSession(client, await callApi(verifyTwoStep, { body }));
+  const verify = async (body: BodyOf<typeof verifyTwoStep>) => {
+    const me = await callApi(verifyTwoStep, { body });
+    if (onVerified) onVerified(me);
+    else enterSession(client, me);
+  };
   return (
     <>
       {usesRecovery ? (
@@ -28,6 +34,7 @@ export function CodeStep() {
           schema={recoverySchema}
           defaults={{ recoveryCode: "" }}
           submitLabel={t("desk:signIn.submitRecovery")}
+          isForSignIn
           onSubmit={verify}
         >
           <TextField
@@ -42,6 +49,7 @@ export function CodeStep() {
           schema={codeSchema}
           defaults={{ code: "" }}
           submitLabel={t("desk:signIn.submitCode")}
+          isForSignIn
           onSubmit={verify}
         >
           <TextField

@@ -23,6 +23,7 @@ export function PasswordStep() {
         schema={loadSchema}
         defaults={{ email: "", password: "" }}
         submitLabel={t("desk:signIn.submit")}
+        isForSignIn
         onSubmit={async (values) => {
           const device = { id: lastDeviceId(), name: describeDevice() };
           enterSession(client, await callApi(signIn, { body: { ...values, device } }));
