@@ -1,26 +1,11 @@
 import { createBrowserRouter, Navigate } from "react-router-dom";
-import { loadDeskWords, loadTradeWords } from "#lib/i18n.ts";
 import { paths } from "#lib/paths.ts";
 import { FailedScreen } from "./failed-screen.tsx";
 import { NotFoundScreen } from "./not-found-screen.tsx";
 import { RequireSession } from "./require-session.tsx";
 import { DeskLayout } from "./layouts/desk-layout.tsx";
+import { screen } from "./screen.tsx";
 
-/** Loads a screen with its words: the desk's, where it is not one of the first, and the trade's, where it shows any. */
-function screen<M>(
-  load: () => Promise<M>,
-  pick: (module: M) => React.ComponentType,
-  options: { trade?: boolean; first?: boolean } = {},
-) {
-  return async () => {
-    const [module] = await Promise.all([
-      load(),
-      options.first ? undefined : loadDeskWords(),
-      options.trade ? loadTradeWords() : undefined,
-    ]);
-    return { Component: pick(module) };
-  };
-}
 const trade = { trade: true };
 const first = { first: true };
 
@@ -114,116 +99,122 @@ export const router = createBrowserRouter([
             element: <DeskLayout />,
             children: [
               {
-                path: "/calls",
-                lazy: screen(
-                  () => import("#features/calls/calls-screen.tsx"),
-                  (m) => m.CallsScreen,
-                  first,
-                ),
-              },
-              {
-                path: "/calls/new",
-                lazy: screen(
-                  () => import("#features/calls/new-call-screen.tsx"),
-                  (m) => m.NewCallScreen,
-                ),
-              },
-              {
-                path: "/calls/:callId",
-                lazy: screen(
-                  () => import("#features/calls/call-screen.tsx"),
-                  (m) => m.CallScreen,
-                ),
-              },
-              {
-                path: "/units/:unitId",
-                lazy: screen(
-                  () => import("#features/units/unit-screen.tsx"),
-                  (m) => m.UnitScreen,
-                  trade,
-                ),
-              },
-              {
-                path: "/units/:unitId/edit",
-                lazy: screen(
-                  () => import("#features/units/edit-unit-screen.tsx"),
-                  (m) => m.EditUnitScreen,
-                  trade,
-                ),
-              },
-              {
-                path: "/sites/:siteId/units/new",
-                lazy: screen(
-                  () => import("#features/units/new-unit-screen.tsx"),
-                  (m) => m.NewUnitScreen,
-                  trade,
-                ),
-              },
-              {
-                path: "/customers",
-                lazy: screen(
-                  () => import("#features/customers/customers-screen.tsx"),
-                  (m) => m.CustomersScreen,
-                ),
-              },
-              {
-                path: "/customers/new",
-                lazy: screen(
-                  () => import("#features/customers/new-customer-screen.tsx"),
-                  (m) => m.NewCustomerScreen,
-                ),
-              },
-              {
-                path: "/customers/:customerId",
-                lazy: screen(
-                  () => import("#features/customers/customer-screen.tsx"),
-                  (m) => m.CustomerScreen,
-                ),
-              },
-              {
-                path: "/team",
-                lazy: screen(
-                  () => import("#features/team/team-screen.tsx"),
-                  (m) => m.TeamScreen,
-                ),
-              },
-              {
-                path: "/settings",
-                lazy: screen(
-                  () => import("#features/team/settings-screen.tsx"),
-                  (m) => m.SettingsScreen,
-                ),
-              },
-              {
-                path: "/review",
-                lazy: screen(
-                  () => import("#features/review/review-list-screen.tsx"),
-                  (m) => m.ReviewListScreen,
-                  trade,
-                ),
-              },
-              {
-                path: "/review/:diagnosisId",
-                lazy: screen(
-                  () => import("#features/review/review-screen.tsx"),
-                  (m) => m.ReviewScreen,
-                  trade,
-                ),
-              },
-              {
-                path: "/account",
-                lazy: screen(
-                  () => import("#features/account/account-screen.tsx"),
-                  (m) => m.AccountScreen,
-                ),
-              },
-              {
-                path: "/sync",
-                lazy: screen(
-                  () => import("#features/sync/sync-screen.tsx"),
-                  (m) => m.SyncScreen,
-                  trade,
-                ),
+                // A screen that fails leaves the ways to the others.
+                errorElement: <FailedScreen />,
+                children: [
+                  {
+                    path: "/calls",
+                    lazy: screen(
+                      () => import("#features/calls/calls-screen.tsx"),
+                      (m) => m.CallsScreen,
+                      first,
+                    ),
+                  },
+                  {
+                    path: "/calls/new",
+                    lazy: screen(
+                      () => import("#features/calls/new-call-screen.tsx"),
+                      (m) => m.NewCallScreen,
+                    ),
+                  },
+                  {
+                    path: "/calls/:callId",
+                    lazy: screen(
+                      () => import("#features/calls/call-screen.tsx"),
+                      (m) => m.CallScreen,
+                    ),
+                  },
+                  {
+                    path: "/units/:unitId",
+                    lazy: screen(
+                      () => import("#features/units/unit-screen.tsx"),
+                      (m) => m.UnitScreen,
+                      trade,
+                    ),
+                  },
+                  {
+                    path: "/units/:unitId/edit",
+                    lazy: screen(
+                      () => import("#features/units/edit-unit-screen.tsx"),
+                      (m) => m.EditUnitScreen,
+                      trade,
+                    ),
+                  },
+                  {
+                    path: "/sites/:siteId/units/new",
+                    lazy: screen(
+                      () => import("#features/units/new-unit-screen.tsx"),
+                      (m) => m.NewUnitScreen,
+                      trade,
+                    ),
+                  },
+                  {
+                    path: "/customers",
+                    lazy: screen(
+                      () => import("#features/customers/customers-screen.tsx"),
+                      (m) => m.CustomersScreen,
+                    ),
+                  },
+                  {
+                    path: "/customers/new",
+                    lazy: screen(
+                      () => import("#features/customers/new-customer-screen.tsx"),
+                      (m) => m.NewCustomerScreen,
+                    ),
+                  },
+                  {
+                    path: "/customers/:customerId",
+                    lazy: screen(
+                      () => import("#features/customers/customer-screen.tsx"),
+                      (m) => m.CustomerScreen,
+                    ),
+                  },
+                  {
+                    path: "/team",
+                    lazy: screen(
+                      () => import("#features/team/team-screen.tsx"),
+                      (m) => m.TeamScreen,
+                    ),
+                  },
+                  {
+                    path: "/settings",
+                    lazy: screen(
+                      () => import("#features/team/settings-screen.tsx"),
+                      (m) => m.SettingsScreen,
+                    ),
+                  },
+                  {
+                    path: "/review",
+                    lazy: screen(
+                      () => import("#features/review/review-list-screen.tsx"),
+                      (m) => m.ReviewListScreen,
+                      trade,
+                    ),
+                  },
+                  {
+                    path: "/review/:diagnosisId",
+                    lazy: screen(
+                      () => import("#features/review/review-screen.tsx"),
+                      (m) => m.ReviewScreen,
+                      trade,
+                    ),
+                  },
+                  {
+                    path: "/account",
+                    lazy: screen(
+                      () => import("#features/account/account-screen.tsx"),
+                      (m) => m.AccountScreen,
+                    ),
+                  },
+                  {
+                    path: "/sync",
+                    lazy: screen(
+                      () => import("#features/sync/sync-screen.tsx"),
+                      (m) => m.SyncScreen,
+                      trade,
+                    ),
+                  },
+                ],
               },
             ],
           },

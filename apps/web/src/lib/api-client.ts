@@ -35,7 +35,9 @@ interface CallInput<C extends RouteContract> {
 }
 
 /**
- * Calls one route of the contract and returns its answer, checked by the contract's own schema.
+ * Calls one route of the contract and returns its answer, of the type that the contract gives it. The server has
+ * held the answer against the contract's schema; here it is taken as it is, so that the first screens need no
+ * schemas.
  * @throws ApiProblem for every refusal, and with code `offline` where no answer of ours came back.
  */
 export async function callApi<C extends RouteContract>(

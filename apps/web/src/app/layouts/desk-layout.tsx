@@ -5,6 +5,7 @@ import { SchemeSwitch } from "#components/ui/scheme-switch.tsx";
 import { Wordmark } from "#components/ui/wordmark.tsx";
 import { paths } from "#lib/paths.ts";
 import { useMe, useSession } from "#lib/session.tsx";
+import { IN_DESK } from "../failed-screen.tsx";
 
 const LINKS: { to: string; word: string; needs?: Permission }[] = [
   { to: paths.calls, word: "nav.calls" },
@@ -61,7 +62,7 @@ export function DeskLayout() {
         </div>
       </header>
       <main id="content" tabIndex={-1} className="flex grow flex-col outline-none">
-        <Outlet />
+        <Outlet context={IN_DESK} />
       </main>
     </div>
   );

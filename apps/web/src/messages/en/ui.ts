@@ -36,6 +36,8 @@ export const ui = {
     kept: "What you recorded is on this phone.",
     sends: "It sends by itself when the screen is back.",
     again: "Open it again",
+    neverOpened: "No signal. This screen was never opened here.",
+    tryAgain: "Try again",
   },
   ladder: {
     open: "Open the whole ladder",
