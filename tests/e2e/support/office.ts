@@ -21,7 +21,7 @@ export async function openCall(
     office: string;
     profile: UnitProfile;
     complaint: string;
-    customer: { firstName: string; lastName: string; email: string };
+    customer: { firstName: string; lastName: string; email: string; phone?: string };
     address: string;
     unitName: string;
   },

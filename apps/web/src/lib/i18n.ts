@@ -26,6 +26,8 @@ export function loadDeskWords(): Promise<void> {
   deskWords ??= import("#messages/en/desk.ts").then(({ desk }) => {
     i18next.addResourceBundle("en", "desk", desk, true, true);
   });
+  // Without a signal it fails, and is asked for again.
+  deskWords.catch(() => (deskWords = undefined));
   return deskWords;
 }
 
@@ -39,5 +41,6 @@ export function loadTradeWords(): Promise<void> {
       i18next.addResourceBundle("en", "ui", fieldFlow, true, true);
     },
   );
+  tradeWords.catch(() => (tradeWords = undefined));
   return tradeWords;
 }
