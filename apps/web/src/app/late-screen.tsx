@@ -38,7 +38,7 @@ export function LateScreen({ fetchScreen }: { fetchScreen: () => Promise<Compone
 }
 
 async function canReachServer(): Promise<boolean> {
-  return fetch("/health", { cache: "no-store" }).then(
+  return fetch("/health/ready", { cache: "no-store" }).then(
     (answer) => answer.ok,
     () => false,
   );
