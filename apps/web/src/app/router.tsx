@@ -79,6 +79,14 @@ export const router = createBrowserRouter([
                 ),
               },
               {
+                // Read before or after a visit, so it is no part of what a visit fetches.
+                path: "record",
+                lazy: screen(
+                  () => import("#features/diagnosis/screens/record-screen.tsx"),
+                  (m) => m.RecordScreen,
+                ),
+              },
+              {
                 path: ":screen",
                 lazy: screen(
                   () => import("#features/diagnosis/screens/screen-switch.tsx"),

@@ -12,7 +12,6 @@ import { LadderScreen } from "./ladder-screen.tsx";
 import { LookScreen } from "./look-screen.tsx";
 import { ProofScreen } from "./proof-screen.tsx";
 import { PutBackScreen } from "./put-back-screen.tsx";
-import { RecordScreen } from "./record-screen.tsx";
 import { RepairScreen } from "./repair-screen.tsx";
 import { SafetyScreen } from "./safety-screen.tsx";
 import { StopScreen } from "./stop-screen.tsx";
@@ -34,7 +33,6 @@ const SCREENS: Record<string, React.ComponentType> = {
   close: CloseScreen,
   done: DoneScreen,
   ladder: LadderScreen,
-  record: RecordScreen,
   safety: SafetyScreen,
 };
 
