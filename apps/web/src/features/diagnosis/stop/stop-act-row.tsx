@@ -142,11 +142,3 @@ function ActInput({
     }
   }
 }
-
-function TickMark() {
-  return (
-    <svg viewBox="0 0 20 20" width={20} height={20} className="inline" aria-hidden="true">
-      <path d="M3 11l5 5L17 4" fill="none" stroke="currentColor" strokeWidth={3} />
-    </svg>
-  );
-}
