@@ -71,7 +71,7 @@ describe("reference calls of the family", () => {
     it("draws every rung proven after a full call, or the gap where the unit was left off", () => {
       const { state } = play(call, steps);
       const states = new Set(ladderOf(state).map((rung) => rung.state));
-      const expected = call.outcome === "fixed" ? ["proven"] : ["passed", "stopped", "waiting"];
+      const expected = call.outcome === "fixed" ? ["proven"] : ["passed", "proven", "stopped", "waiting"];
       expect([...states].toSorted()).toEqual(expected);
     });
 
