@@ -32,9 +32,12 @@ export function DeskLayout() {
         {me.company.mode === "demo" && (
           <p className="border-b border-hair px-4 text-label font-semibold desk:hidden">{t("nav.demo")}</p>
         )}
-        <div className="flex min-h-12 items-center gap-x-3 px-4 desk:gap-x-6 desk:px-6">
+        <div className="flex min-h-12 items-center gap-x-3 px-4 large-letters:flex-wrap desk:gap-x-6 desk:px-6">
           <Wordmark isShortOnPhone />
-          <nav aria-label={t("nav.label")} className="flex min-w-0 grow overflow-x-auto desk:grow-0">
+          <nav
+            aria-label={t("nav.label")}
+            className="flex min-w-0 grow overflow-x-auto large-letters:order-1 large-letters:basis-full large-letters:flex-wrap desk:grow-0"
+          >
             {LINKS.filter((link) => !link.needs || can(link.needs)).map((link) => (
               <NavLink
                 key={link.to}

@@ -39,7 +39,7 @@ export function LadderStrip({
     <button
       type="button"
       onClick={onOpen}
-      className={`focus-inside relative w-12 shrink-0 border-hair bg-ground p-0 ${side === "right" ? "border-l-2" : "border-r-2"}`}
+      className={`focus-inside relative w-[48px] shrink-0 border-hair bg-ground p-0 ${side === "right" ? "border-l-2" : "border-r-2"}`}
       aria-label={t("ladder.open")}
     >
       <svg

@@ -33,7 +33,7 @@ export function StepList({
                 type="button"
                 onClick={() => onGo(step.number)}
                 aria-current={step.number === at ? "step" : undefined}
-                className={`flex min-h-12 w-full items-center gap-2 py-1 text-left text-field desk:min-h-8 desk:text-small ${step.number === at ? "border-l-6 border-ink bg-surface pl-2" : "pl-3.5"}`}
+                className={`focus-inside flex min-h-12 w-full items-center gap-2 py-1 text-left text-field desk:min-h-8 desk:text-small ${step.number === at ? "border-l-6 border-ink bg-surface pl-2" : "pl-3.5"}`}
               >
                 <StepLine step={step} />
               </button>

@@ -26,13 +26,13 @@ export function AnswerButton({
       className={`flex min-h-14 w-full items-stretch rounded bg-surface text-left text-field font-semibold text-ink ${chosen ? "border-4 border-ink" : "border-2 border-rule"}`}
     >
       <span
-        className={`grid w-12 shrink-0 place-items-center ${chosen ? "bg-ink text-ground" : "text-ink"}`}
+        className={`grid w-[48px] shrink-0 place-items-center ${chosen ? "bg-ink text-ground" : "text-ink"}`}
         aria-hidden="true"
       >
         {symbol ?? <Box checked={chosen} />}
       </span>
-      <span className="flex grow items-center justify-between gap-3 px-2 py-2">
-        <span>{children}</span>
+      <span className="flex min-w-0 grow items-center justify-between gap-3 px-2 py-2 large-letters:flex-wrap">
+        <span className="min-w-0">{children}</span>
         {aside && (
           <span className="numeric text-label font-normal whitespace-nowrap text-quiet">{aside}</span>
         )}

@@ -12,7 +12,7 @@ export function CallDock() {
   return (
     <nav
       aria-label={t("dock.label")}
-      className="sticky bottom-0 z-1 grid h-15 shrink-0 grid-cols-2 border-t-3 border-ink bg-surface desk:hidden"
+      className="sticky bottom-0 z-1 grid min-h-15 shrink-0 grid-cols-2 border-t-3 border-ink bg-surface desk:hidden"
     >
       <Suspense fallback={<span />}>
         <SavedChip />

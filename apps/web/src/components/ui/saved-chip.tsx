@@ -14,7 +14,7 @@ export function SavedChip() {
   return (
     <Link
       to={paths.sync}
-      className={`focus-inside flex items-center justify-center gap-2 border-x-2 border-hair px-1 text-label leading-4.5 font-medium no-underline ${alarming ? "bg-stopped text-on-stopped" : "text-ink"}`}
+      className={`focus-inside flex items-center justify-center gap-2 large-letters:flex-col border-x-2 border-hair px-1 text-label leading-4.5 font-medium no-underline ${alarming ? "bg-stopped text-on-stopped" : "text-ink"}`}
     >
       <svg
         viewBox="0 0 22 30"
@@ -35,7 +35,7 @@ export function SavedChip() {
           <path d="M6 15l4 4 6-8" />
         )}
       </svg>
-      <span role="status" className="max-w-[5.5rem]">
+      <span role="status" className="max-w-[5.5rem] large-letters:max-w-full">
         {words}
       </span>
     </Link>

@@ -12,7 +12,7 @@ export function SchemeSwitch() {
       onClick={() => chooseScheme(next)}
       aria-label={t("scheme.switch", { now: t(`scheme.${scheme}`), next: t(`scheme.${next}`) })}
       title={t(`scheme.${scheme}`)}
-      className="grid size-12 place-items-center desk:size-9 rounded border-2 border-rule"
+      className="grid size-[48px] place-items-center desk:size-9 rounded border-2 border-rule"
     >
       <svg
         viewBox="0 0 24 24"

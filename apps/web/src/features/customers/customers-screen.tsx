@@ -54,7 +54,7 @@ export function CustomersScreen() {
         {customers.data?.items.map((customer) => (
           <li
             key={customer.id}
-            className="relative grid gap-x-6 border-b border-hair px-4 py-3 hover:bg-surface desk:grid-cols-[2fr_2fr_1fr_1fr] desk:items-center desk:px-6"
+            className="relative grid grid-cols-1 gap-x-6 border-b border-hair px-4 py-3 hover:bg-surface desk:grid-cols-[2fr_2fr_1fr_1fr] desk:items-center desk:px-6"
           >
             {/* The whole row is the target. */}
             <Link

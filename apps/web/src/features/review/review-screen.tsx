@@ -48,7 +48,14 @@ function Review({ record }: { record: DiagnosisDetail }) {
   const state = useMemo(() => fold(record.events.slice(0, at)), [record, at]);
   const whole = useMemo(() => fold(record.events), [record]);
   const go = (to: number) =>
-    setSearch({ step: String(Math.min(Math.max(1, to), steps.length)) }, { replace: true });
+    setSearch(
+      { step: String(Math.min(Math.max(1, to), steps.length)) },
+      {
+        replace: true,
+        // At once, so that a held arrow key does not fall on the step before.
+        flushSync: true,
+      },
+    );
   if (!step) return null;
   const { verification } = record;
   return (

@@ -22,7 +22,7 @@ export function SignInFrame({
     <div className="flex min-h-dvh">
       <div
         aria-hidden="true"
-        className="flex w-20 shrink-0 justify-center border-r border-hair bg-surface desk:w-64"
+        className="flex w-20 shrink-0 large-letters:hidden justify-center border-r border-hair bg-surface desk:w-64"
       >
         <div className="my-2 flex w-12 flex-col justify-evenly border-x-(length:--rail) border-ink desk:w-32">
           {RUNGS.map((rung) => (
@@ -32,7 +32,7 @@ export function SignInFrame({
       </div>
       <main className="min-w-0 grow p-4 desk:flex desk:items-center desk:px-24">
         <div className="mx-auto flex max-w-110 flex-col gap-5 desk:mx-0 desk:w-110">
-          <div className="flex items-start justify-between gap-3">
+          <div className="flex flex-wrap items-start justify-between gap-3">
             <div>
               <Wordmark />
               <p className="text-field text-quiet">{t("desk:signIn.line")}</p>

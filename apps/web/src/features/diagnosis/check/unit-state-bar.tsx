@@ -15,7 +15,7 @@ export function UnitStateBar({ check, node }: { check: CheckId; node: AskingNode
     t(unit.gas === "open" ? "unitState.gasOpen" : "unitState.gasShut"),
   ];
   return (
-    <ul className="short:group-has-[input:not(:placeholder-shown)]:hidden grid grid-cols-3 divide-x-2 divide-hair rounded border-2 border-hair bg-surface text-center text-label font-semibold">
+    <ul className="short:group-has-[input:not(:placeholder-shown)]:hidden grid grid-cols-3 divide-x-2 divide-hair rounded large-letters:grid-cols-1 large-letters:divide-x-0 border-2 border-hair bg-surface text-center text-label font-semibold">
       {cells.map((cell) => (
         <li key={cell} className="px-1 py-1.5">
           {cell}

@@ -26,7 +26,7 @@ export function LookRow({
   const foundWord =
     look?.check && look.finding ? t(`trade:findings.${look.check}.${look.finding}`) : undefined;
   return (
-    <li className="grid grid-cols-[1fr_6.5rem] gap-2">
+    <li className="grid grid-cols-[1fr_6.5rem] large-letters:grid-cols-1 gap-2">
       <button
         type="button"
         aria-pressed={right}

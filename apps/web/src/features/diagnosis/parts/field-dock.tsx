@@ -12,18 +12,18 @@ export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: 
   return (
     <nav
       aria-label={t("dock.label")}
-      className="grid h-15 shrink-0 grid-cols-3 border-t-3 border-ink bg-surface"
+      className="grid min-h-15 shrink-0 grid-cols-3 border-t-3 border-ink bg-surface large-letters:grid-cols-[2fr_3fr_3fr] large-letters:sticky large-letters:bottom-0 large-letters:z-1"
     >
       <Link
         to={paths.diagnosis.putBack(diagnosisId)}
-        className="focus-inside flex items-center justify-center gap-2 text-label leading-4.5 font-medium text-ink no-underline"
+        className="focus-inside flex items-center justify-center gap-2 large-letters:flex-col text-label leading-4.5 font-medium text-ink no-underline"
       >
         <span
           className={`numeric grid size-7 place-items-center rounded border-2 ${out > 0 ? "border-ink bg-ink text-ground" : "border-rule"}`}
         >
           {out}
         </span>
-        <span className="w-11">
+        <span className="w-11 large-letters:w-auto">
           {t("dock.putBack")}
           <span className="sr-only">{t("dock.stillOut")}</span>
         </span>
@@ -31,7 +31,7 @@ export function FieldDock({ diagnosisId, state }: { diagnosisId: string; state: 
       <SavedChip />
       <Link
         to={paths.diagnosis.safety(diagnosisId)}
-        className="focus-inside grid place-items-center border-2 border-caution-edge bg-caution px-1 text-center text-label leading-4.5 font-semibold text-on-caution no-underline"
+        className="focus-inside grid place-items-center border-2 border-caution-edge bg-caution px-1 large-letters:px-0 text-center text-label leading-4.5 font-semibold text-on-caution no-underline"
       >
         {t("dock.safety")}
       </Link>

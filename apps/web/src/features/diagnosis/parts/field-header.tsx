@@ -6,12 +6,12 @@ export function FieldHeader({ title, subtitle }: { title: string; subtitle: stri
   const { t } = useTranslation();
   const navigate = useNavigate();
   return (
-    <header className="flex h-15 shrink-0 items-center border-b-3 border-ink bg-surface short:h-13">
+    <header className="flex min-h-15 shrink-0 items-center border-b-3 border-ink bg-surface short:min-h-13">
       <button
         type="button"
         onClick={() => void navigate(-1)}
         aria-label={t("field.back")}
-        className="focus-inside grid size-14 shrink-0 place-items-center short:h-13"
+        className="focus-inside grid size-[56px] shrink-0 place-items-center self-stretch short:h-[52px]"
       >
         <svg
           viewBox="0 0 24 24"
@@ -26,8 +26,8 @@ export function FieldHeader({ title, subtitle }: { title: string; subtitle: stri
         </svg>
       </button>
       <div className="min-w-0 text-field">
-        <p className="truncate leading-5.5 font-semibold">{title}</p>
-        <p className="truncate leading-5.5 text-quiet">{subtitle}</p>
+        <p className="leading-5.5 font-semibold">{title}</p>
+        <p className="leading-5.5 text-quiet">{subtitle}</p>
       </div>
     </header>
   );

@@ -47,7 +47,7 @@ export function FieldLayout({
   const navigate = useNavigate();
   const side = useHandedness();
   return (
-    <div className="flex h-dvh flex-col bg-ground">
+    <div className="flex h-dvh flex-col bg-ground large-letters:h-auto large-letters:min-h-dvh">
       <FieldHeader title={title} subtitle={subtitle} />
       {!stopped && <StopBanner diagnosisId={diagnosisId} state={state} />}
       {flush}

@@ -11,8 +11,8 @@ export function UndoLine() {
   if (!last) return null;
   return (
     <p className="flex items-center justify-between gap-3 border-t-1 border-hair pt-1 text-field text-quiet">
-      <span className="min-w-0 truncate">{t("undo.recorded", { what: t(`undo.what.${last.type}`) })}</span>
-      <span className="shrink-0 whitespace-nowrap">
+      <span className="min-w-0">{t("undo.recorded", { what: t(`undo.what.${last.type}`) })}</span>
+      <span className="shrink-0 whitespace-nowrap large-letters:shrink large-letters:whitespace-normal">
         <LinkButton onClick={() => void recordAndGoOn([command("event.undone", { of: last.id })])}>
           {t("undo.takeBack")}
         </LinkButton>

@@ -25,7 +25,7 @@ export function ProofAct({ item, stays }: { item: ProofItem; stays: boolean }) {
       const lit = item.reading?.value ?? 0;
       const asked = item.lights ?? 1;
       return (
-        <div className="grid grid-cols-[1fr_7rem] gap-2">
+        <div className="grid grid-cols-[1fr_7rem] large-letters:grid-cols-1 gap-2">
           <AnswerButton
             onChoose={() =>
               void record([
@@ -82,7 +82,7 @@ export function ProofAct({ item, stays }: { item: ProofItem; stays: boolean }) {
       return typing ? (
         <ProofNumber item={item} stays={stays} />
       ) : (
-        <div className="grid grid-cols-[1fr_8rem] gap-2">
+        <div className="grid grid-cols-[1fr_8rem] large-letters:grid-cols-1 gap-2">
           <AnswerButton
             onChoose={() =>
               void record([

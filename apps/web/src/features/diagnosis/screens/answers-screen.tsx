@@ -105,14 +105,20 @@ export function AnswersScreen() {
       <RefusalNote />
       <dl className="flex flex-col divide-y-1 divide-hair border-y-1 border-hair text-field">
         {rows.map((row) => (
-          <div key={row.id} className="grid grid-cols-[1fr_auto] items-start gap-x-3 py-2">
+          <div
+            key={row.id}
+            className="grid grid-cols-[minmax(0,1fr)_auto] large-letters:grid-cols-1 items-start gap-x-3 py-2"
+          >
             <dt className="font-semibold">{row.what}</dt>
             <dd className="flex items-center gap-2 text-quiet">
               {row.outcome && <OutcomeMark outcome={row.outcome} />}
               {row.value}
             </dd>
-            <dd className="col-start-2 row-span-2 row-start-1">
-              <Link to={row.change} className="flex min-h-12 min-w-12 items-center justify-end">
+            <dd className="col-start-2 row-span-2 row-start-1 large-letters:col-start-1 large-letters:row-start-auto">
+              <Link
+                to={row.change}
+                className="flex min-h-12 min-w-12 items-center justify-end large-letters:justify-start"
+              >
                 {t("answers.change")}
                 <span className="sr-only">{` ${row.what}`}</span>
               </Link>

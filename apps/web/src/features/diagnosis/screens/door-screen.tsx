@@ -79,7 +79,7 @@ export function DoorScreen() {
         >
           {t("door.peopleWell")}
         </AnswerButton>
-        <div className="grid grid-cols-[4fr_3fr_3fr] gap-2">
+        <div className="grid grid-cols-[4fr_3fr_3fr] large-letters:grid-cols-1 gap-2">
           <PlainButton compact onClick={() => setTyping("co")}>
             {people?.coPpm ? t("door.coStored", { ppm: people.coPpm }) : t("door.coMore")}
           </PlainButton>
@@ -99,7 +99,7 @@ export function DoorScreen() {
         >
           {t("door.smellNone")}
         </AnswerButton>
-        <div className="grid grid-cols-2 gap-2">
+        <div className="grid grid-cols-2 large-letters:grid-cols-1 gap-2">
           <PlainButton compact onClick={() => setTyping("lel")}>
             {smell?.lelPct ? t("door.lelStored", { pct: smell.lelPct }) : t("door.lelMore")}
           </PlainButton>
@@ -109,7 +109,7 @@ export function DoorScreen() {
         </div>
       </Question>
       <Question number={3} text={t(onRoof ? "door.wayInRoof" : "door.wayIn")} last>
-        <div className="grid grid-cols-[1fr_6rem] gap-2">
+        <div className="grid grid-cols-[1fr_6rem] large-letters:grid-cols-1 gap-2">
           <AnswerButton
             chosen={wayIn?.safe === true}
             aside={time(wayIn?.at)}

@@ -39,7 +39,7 @@ export function EndActs({
         <PrimaryButton onClick={() => onEnd("limit-cut")} detail={t("watch.limitCutDetail")}>
           {t("watch.limitCut")}
         </PrimaryButton>
-        <div className="grid grid-cols-2 gap-2">
+        <div className="grid grid-cols-2 large-letters:grid-cols-1 gap-2">
           <PlainButton compact onClick={() => onEnd("flame-lost")}>
             {t("watch.flameLost")}
           </PlainButton>
