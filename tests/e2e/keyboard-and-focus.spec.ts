@@ -133,9 +133,9 @@ test("less motion runs no animation, forced colours keep every edge, a dark syst
   /** Lines of the ladder that have the colour of the ground, and so cannot be seen. */
   const lost = () =>
     page.evaluate(() => {
-      const ground = getComputedStyle(document.documentElement).backgroundColor;
+      const own = getComputedStyle(document.documentElement).backgroundColor;
       return [...document.querySelectorAll("svg line")].filter(
-        (line) => getComputedStyle(line).stroke === ground,
+        (line) => getComputedStyle(line).stroke === own,
       ).length;
     });
   expect(await edges(), "controls without an edge at the door").toEqual([]);

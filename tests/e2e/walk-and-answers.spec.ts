@@ -197,6 +197,12 @@ test("gas smell and CO are one tap away on every field page, with and without a 
     await expect(heading(page), `the acts from ${screen}`).toHaveText("What is wrong?");
     await page.goBack();
   }
+  // Nothing was answered yet, and the answers say so.
+  await page.evaluate((path) => {
+    history.pushState({}, "", path);
+    dispatchEvent(new PopStateEvent("popstate"));
+  }, `${base}/answers`);
+  await expect(page.locator("main dl > div").first()).toContainText("Not provided");
   // A stop rule called without a signal: its acts count down in words, and gas smell takes no tap until outside.
   await safety.click();
   await hands.tap("Someone is unwell");

@@ -40,9 +40,7 @@ async function lookAtFocus(page: Page): Promise<Stop | null> {
       const { backgroundColor } = getComputedStyle(element);
       return isClear(backgroundColor) ? groundOf(element.parentElement) : backgroundColor;
     };
-    const { outlineOffset, outlineWidth } = getComputedStyle(holder);
-    const offset = Number.parseFloat(outlineOffset);
-    const width = Number.parseFloat(outlineWidth);
+    const offset = Number.parseFloat(getComputedStyle(holder).outlineOffset);
     const root = document.documentElement;
     const chosen = root.dataset["scheme"];
     for (const scheme of ["daylight", "attic", "full-sun"]) {

@@ -4,8 +4,8 @@ import type { Page } from "@playwright/test";
 export async function readPhone(page: Page): Promise<Record<string, string>> {
   return page.evaluate(async () => {
     const kept: Record<string, string> = {
-      localStorage: JSON.stringify({ ...localStorage }),
-      sessionStorage: JSON.stringify({ ...sessionStorage }),
+      localStorage: JSON.stringify(Object.entries(localStorage)),
+      sessionStorage: JSON.stringify(Object.entries(sessionStorage)),
     };
     for (const { name = "" } of await indexedDB.databases()) {
       const database = await new Promise<IDBDatabase>((resolve, reject) => {

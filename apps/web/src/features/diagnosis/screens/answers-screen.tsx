@@ -1,4 +1,12 @@
-import { breaches, command, likelyOutcome, ladderOf, openPutBacks, proofOf } from "@emberladder/diagnosis";
+import {
+  breaches,
+  command,
+  likelyOutcome,
+  ladderOf,
+  openPutBacks,
+  proofOf,
+  doorProgress,
+} from "@emberladder/diagnosis";
 import type { BodyOf } from "@emberladder/diagnosis";
 import { format } from "date-fns";
 import { useTranslation } from "react-i18next";
@@ -43,7 +51,7 @@ export function AnswersScreen() {
     {
       id: "door",
       what: t("answers.door"),
-      value: t("answers.doorClear"),
+      value: t(doorProgress(state).complete ? "answers.doorClear" : "answers.notProvided"),
       change: paths.diagnosis.door(diagnosisId),
     },
     ...state.looks.map((look) => ({
