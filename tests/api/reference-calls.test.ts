@@ -143,7 +143,7 @@ describe.each(readFamilyCalls())("reference call $id $slug", (call) => {
 
   it("is flagged for a reading that is taken back after the closing, which holds the report back", async () => {
     const house = await openHouse(call);
-    const reading = house.steps.findIndex(({ command }) => command.type === "check.answered");
+    const reading = house.steps.findIndex((step) => step.command.type === "check.answered");
     const late = command("event.undone", { of: house.eventId(reading) });
     const minute = (house.steps.at(-1)?.minute ?? 0) + 5;
     expect(await house.send([...house.steps, { minute, command: late }])).toContain("after-close");

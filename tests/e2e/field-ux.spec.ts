@@ -60,6 +60,7 @@ for (const scheme of ["daylight", "attic", "full-sun"] as const) {
     await hands.type("7.1");
     await inspectField(page, "number check");
     await page.goto(`${base}/check?check=ck-limit-voltage`);
+    await page.locator("h1").waitFor();
     const start = page.getByRole("button", { name: /Call for heat|Power on|Start this check/ });
     if (await start.count()) await start.first().click();
     await page.getByLabel("In", { exact: true }).fill("24.6");

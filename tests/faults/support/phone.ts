@@ -36,7 +36,7 @@ export async function takePhone(company: TestCompany, role: Role, count: number)
   const waiting = [...made];
   const acknowledged = new Set<string>();
   const refusals: Phone["refusals"] = [];
-  let isStopped = false;
+  const sending = { isStopped: false };
   const sendOnce = async () => {
     const events = waiting.slice(0, BATCH);
     const answer = await client.call("sendBatch", { body: { events } });
@@ -62,11 +62,11 @@ export async function takePhone(company: TestCompany, role: Role, count: number)
     refusals,
     outbox: () => waiting.length,
     stop: () => {
-      isStopped = true;
+      sending.isStopped = true;
     },
     run: async () => {
-      isStopped = false;
-      while (waiting.length > 0 && !isStopped) {
+      sending.isStopped = false;
+      while (waiting.length > 0 && !sending.isStopped) {
         try {
           await sendOnce();
         } catch (error) {
