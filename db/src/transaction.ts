@@ -1,5 +1,7 @@
 import { setTimeout as sleep } from "node:timers/promises";
+import { drizzle } from "drizzle-orm/mysql2";
 import type { Database, Transaction } from "./client.ts";
+import { transactionPoolOf } from "./client.ts";
 
 /** Deadlock, lock wait too long, and (on a cluster) node not ready: the same work may succeed when repeated. */
 const REPEATABLE = new Set([1213, 1205, 1047]);
@@ -29,6 +31,11 @@ export function readDuplicateKey(error: unknown): string | undefined {
     current = current.cause;
   }
   return undefined;
+}
+
+/** Whether an error says that a row names another row that there is not (MariaDB error 1452). */
+export function isReferenceMissing(error: unknown): boolean {
+  return readDatabaseError(error)?.errno === 1452;
 }
 
 const AWAY_CODES = new Set([
@@ -84,11 +91,29 @@ export async function inTransaction<T>(
 ): Promise<T> {
   for (let attempt = 1; ; attempt += 1) {
     try {
-      return await database.transaction(work);
+      return await runOnce(database, work);
     } catch (error) {
       const { errno } = readDatabaseError(error) ?? { errno: 0 };
       if (attempt === ATTEMPTS || !REPEATABLE.has(errno)) throw error;
       await sleep(attempt * 10 + pause() * 20);
     }
   }
+}
+
+async function runOnce<T>(database: Database, work: (transaction: Transaction) => Promise<T>): Promise<T> {
+  const connection = await transactionPoolOf(database).getConnection();
+  let result: T;
+  try {
+    result = await work(drizzle({ client: connection }));
+    await connection.commit();
+  } catch (error) {
+    // A connection on which the undoing fails is broken; ending it undoes the transaction as well.
+    await connection.rollback().then(
+      () => connection.release(),
+      () => connection.destroy(),
+    );
+    throw error;
+  }
+  connection.release();
+  return result;
 }

@@ -144,9 +144,11 @@ describe("the address of a caller", () => {
     ).status;
 
   it("is not taken from a header unless the proxy is named", async () => {
+    const open = await startTestServer({ TRUST_PROXY: "" });
     const statuses = [];
-    for (let i = 1; i <= 7; i += 1) statuses.push(await signInFrom(server, `203.0.113.${i}`));
+    for (let i = 1; i <= 7; i += 1) statuses.push(await signInFrom(open, `203.0.113.${i}`));
     expect(statuses.filter((status) => status === 429)).toHaveLength(2);
+    await open.close();
   });
 
   it("is taken from a named proxy", async () => {

@@ -45,11 +45,15 @@ export interface ApiProcess extends TestServer {
   printed: () => string;
 }
 
-/** Prepares a server process over a database; `start` has to be called. `close` ends it and clears up. */
+/**
+ * Prepares a server process over a database; `start` has to be called. `close` ends it and clears up.
+ * @param nodeArgs arguments of node, for measurements
+ */
 export async function prepareApiProcess(
   bundle: ServerBundle,
   databaseUrl: string,
   variables: Record<string, string> = {},
+  nodeArgs: readonly string[] = [],
 ): Promise<ApiProcess> {
   const port = await findFreePort();
   const dataDir = await mkdtemp(join(tmpdir(), "emberladder-process-"));
@@ -88,7 +92,7 @@ export async function prepareApiProcess(
     },
     printed: () => printed,
     start: async () => {
-      const started = spawn(process.execPath, ["--enable-source-maps", bundle.main], {
+      const started = spawn(process.execPath, ["--enable-source-maps", ...nodeArgs, bundle.main], {
         env: { PATH: process.env["PATH"], TZ: "UTC", NODE_ENV: "production", ...given },
         stdio: ["ignore", "pipe", "pipe"],
       });

@@ -104,6 +104,8 @@ function serverArguments(folder, port) {
     "--collation-server=utf8mb4_unicode_520_ci",
     "--default-time-zone=+00:00",
     "--innodb-flush-log-at-trx-commit=1",
+    // Without locks on gaps, diagnoses that are opened side by side do not wait for each other or deadlock.
+    "--transaction-isolation=READ-COMMITTED",
     "--innodb-buffer-pool-size=256M",
     "--max-connections=200",
     "--max-allowed-packet=16M",

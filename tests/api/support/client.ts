@@ -1,3 +1,4 @@
+import { randomBytes } from "node:crypto";
 import { addressOf, routeContracts } from "@emberladder/contract";
 import type { Problem, RouteName } from "@emberladder/contract";
 import type { TestServer } from "./test-server.ts";
@@ -27,8 +28,15 @@ export interface TestClient {
   cookie: string | undefined;
 }
 
+/** An address of the range for examples, 2001:db8::/32 (RFC 3849). */
+function inventAddress(): string {
+  const groups = (randomBytes(12).toString("hex").match(/.{4}/g) ?? []).join(":");
+  return `2001:db8:${groups}`;
+}
+
 /** A browser as far as the API can tell: it keeps the cookie and sends the product's own origin. */
 export function createClient(server: TestServer, cookie?: string): TestClient {
+  const address = inventAddress();
   const client: TestClient = {
     cookie,
     call: async (name, { params, query, body } = {}) => {
@@ -47,6 +55,7 @@ export function createClient(server: TestServer, cookie?: string): TestClient {
         ...init,
         headers: {
           origin: server.dependencies.environment.publicOrigin,
+          "x-forwarded-for": address,
           ...(client.cookie ? { cookie: client.cookie } : {}),
           ...init.headers,
         },

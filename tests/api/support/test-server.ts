@@ -64,6 +64,8 @@ export async function startTestServer(
       MAIL_DIR: join(dataDir, "mail"),
       SESSION_SECRET: TEST_SECRET,
       SMTP_URL: "smtp://127.0.0.1:1",
+      // Each test client has an address of its own, so that no test spends another's budget.
+      TRUST_PROXY: "127.0.0.1",
       ...variables,
     }),
   };

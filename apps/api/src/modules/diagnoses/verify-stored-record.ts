@@ -1,5 +1,6 @@
-import { sha256Hex, verifyRecord } from "@emberladder/diagnosis";
+import { verifyRecord } from "@emberladder/diagnosis";
 import type { ChainBreak, StoredEvent } from "@emberladder/diagnosis";
+import { hashText } from "#modules/sync/hash-text.ts";
 import type { EventRow } from "#modules/sync/repository.ts";
 import { readStoredEvent } from "#modules/sync/repository.ts";
 
@@ -23,7 +24,7 @@ export function verifyStoredRecord(
   };
   rows.forEach((row, index) => {
     const event = events[index];
-    if (!event || sha256Hex(row.canonicalText) !== row.hash || !isSame(row, event))
+    if (!event || hashText(row.canonicalText) !== row.hash || !isSame(row, event))
       report({ serverSeq: row.serverSeq, reason: "hash" });
   });
   const last = rows.at(-1);

@@ -1,5 +1,5 @@
 import type { RejectionCode } from "@emberladder/contract";
-import { inTransaction, readDuplicateKey } from "@emberladder/db";
+import { inTransaction, isReferenceMissing, readDuplicateKey } from "@emberladder/db";
 import type { Transaction } from "@emberladder/db";
 import { GENESIS_HASH } from "@emberladder/diagnosis";
 import type { Actor } from "#http/actor.ts";
@@ -38,36 +38,48 @@ interface Outcome {
 /**
  * Appends the events of one diagnosis in one transaction, as far as they are good.
  *
- * Most batches simply go on from a head that this process committed itself: the quick way moves that head on,
- * which the database refuses when it is no longer the head, and inserts. Whatever is not so simple (a new
- * diagnosis, another process's head, a repetition, a break) goes the careful way: the row is locked, the
- * record read, and earlier events looked up, to tell which event is which.
+ * Most batches simply go on from a head that this process committed itself, or open a diagnosis: the quick ways
+ * write at once, and the database refuses them where it is not so after all. Whatever is not so simple (another
+ * process's head, a repetition, a break, a place of another company) goes the careful way: the row is locked,
+ * the record read, and earlier events looked up, to tell which event is which.
  */
 export async function appendGroup(context: Context, items: readonly GoodItem[]): Promise<GroupVerdict> {
   const [first] = items;
   if (!first) throw new Error("A group has at least one event.");
-  const kept = findKeptHead(first.envelope.diagnosisId);
   const work = (way: (tx: Transaction) => Promise<Outcome>) => inTransaction(context.database, way);
+  const careful = (tx: Transaction) => appendCarefully(tx, context, items, first);
+  const quick = quickWay(context, items, first);
   let outcome: Outcome;
   try {
-    outcome = await (kept && kept.row.companyId === context.actor.companyId
-      ? work(async (tx) => appendQuickly(tx, context, items, kept))
-      : work(async (tx) => appendCarefully(tx, context, items, first)));
+    outcome = await work(quick ?? careful);
   } catch (error) {
-    if (!(error instanceof NeedsCare) && readDuplicateKey(error) === undefined) throw error;
-    outcome = await work(async (tx) => appendCarefully(tx, context, items, first));
+    const isUnderstood =
+      error instanceof NeedsCare || readDuplicateKey(error) !== undefined || isReferenceMissing(error);
+    if (!isUnderstood) throw error;
+    outcome = await work(careful);
   }
   if (outcome.keep) keepHead(first.envelope.diagnosisId, outcome.keep);
   return outcome.verdict;
 }
 
-async function appendQuickly(
-  tx: Transaction,
+/** How to write without looking first; undefined where there is nothing to go on from. */
+function quickWay(
   context: Context,
   items: readonly GoodItem[],
-  { row, head }: KeptHead,
-): Promise<Outcome> {
-  return write(tx, context, { row, head, isNew: false }, judgeItems(items, head, undefined, context));
+  first: GoodItem,
+): ((tx: Transaction) => Promise<Outcome>) | undefined {
+  const kept = findKeptHead(first.envelope.diagnosisId);
+  if (kept && kept.row.companyId === context.actor.companyId) {
+    const { row, head } = kept;
+    return async (tx) =>
+      write(tx, context, { row, head, isNew: false }, judgeItems(items, head, undefined, context));
+  }
+  const row = newRowOf(context, first);
+  if (!row || kept) return undefined;
+  return async (tx) => {
+    const head = await readHead(tx, row, readOpening(first.read)?.tree ?? null);
+    return write(tx, context, { row, head, isNew: true }, judgeItems(items, head, undefined, context));
+  };
 }
 
 async function appendCarefully(
@@ -76,10 +88,12 @@ async function appendCarefully(
   items: readonly GoodItem[],
   first: GoodItem,
 ): Promise<Outcome> {
+  const { companyId } = context.actor;
   const existing = await lockDiagnosis(tx, first.envelope.diagnosisId);
-  const row = existing ?? (await readNewDiagnosis(tx, context, first));
+  const row = existing ?? newRowOf(context, first);
   if (row === undefined) return refuseAll(first, "not-opened");
-  if (row.companyId !== context.actor.companyId) return refuseAll(first, "unknown-diagnosis");
+  if (row.companyId !== companyId) return refuseAll(first, "unknown-diagnosis");
+  if (!existing && !(await areOfCompany(tx, companyId, row))) return refuseAll(first, "not-opened");
   const head = await readHead(tx, row, readOpening(first.read)?.tree ?? null);
   const known = await findKnownEvents(
     tx,
@@ -92,16 +106,14 @@ function refuseAll(item: GoodItem, code: RejectionCode): Outcome {
   return { verdict: { accepted: [], duplicate: [], refused: { item, code }, flags: [], head: undefined } };
 }
 
-/** The row of a new diagnosis by its opening; undefined when the event does not open one rightly. */
-async function readNewDiagnosis(
-  tx: Transaction,
+/** The row of a new diagnosis by its opening; undefined when the event opens none. */
+function newRowOf(
   { actor, now, environment }: Context,
   { read, envelope }: GoodItem,
-): Promise<DiagnosisRow | undefined> {
+): DiagnosisRow | undefined {
   const opening = readOpening(read);
   if (!opening) return undefined;
   const { callId, unitId } = opening;
-  if (!(await areOfCompany(tx, actor.companyId, { callId, unitId }))) return undefined;
   return {
     id: envelope.diagnosisId,
     companyId: actor.companyId,
@@ -133,9 +145,9 @@ async function write(
   const { accepted, duplicate, refused, flags, rows } = judged;
   const verdict = { accepted, duplicate, refused, flags, head: judged.head.serverSeq };
   if (rows.length === 0) return { verdict };
-  if (isNew) await insertDiagnosis(tx, row);
   const change = await projectRow(tx, context, { row, before: head, judged });
-  if (!(await moveHead(tx, head, row.id, { ...change, newFlags: flags.length }))) throw new NeedsCare();
+  if (isNew) await insertDiagnosis(tx, { ...row, ...change, flags: flags.length });
+  else if (!(await moveHead(tx, head, row.id, { ...change, newFlags: flags.length }))) throw new NeedsCare();
   await insertEvents(tx, rows);
   await insertFlags(
     tx,

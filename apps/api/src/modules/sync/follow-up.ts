@@ -41,7 +41,8 @@ export async function projectRow(
   const after = projectState(judged.head.state);
   let waiting: Pick<ProjectedRow, "waitsForRelease"> = {};
   if (after.wantsReport && !projectState(before.state).wantsReport) {
-    const rules = [...(await listFlagRules(tx, row.id)), ...judged.flags.map(({ rule }) => rule)];
+    const earlier = row.serverSeq === 0 ? [] : await listFlagRules(tx, row.id);
+    const rules = [...earlier, ...judged.flags.map(({ rule }) => rule)];
     waiting = { waitsForRelease: rules.some((rule) => !INFORMATIVE_RULES.includes(rule)) };
   }
   return {

@@ -2,6 +2,7 @@ import type { RejectionCode } from "@emberladder/contract";
 import { chainHashOf, GENESIS_HASH } from "@emberladder/diagnosis";
 import type { Actor } from "#http/actor.ts";
 import { flagsOf } from "./flags.ts";
+import { hashText } from "./hash-text.ts";
 import { evolveState } from "./judge.ts";
 import type { Breach } from "./judge.ts";
 import type { GoodItem } from "./read-batch.ts";
@@ -35,9 +36,10 @@ export function judgeItems(
   known: readonly KnownEvent[] | undefined,
   { actor, now }: { actor: Actor; now: Date },
 ): Judged {
-  const byId = new Map((known ?? []).map((event) => [event.id, event]));
-  const byNumber = new Map((known ?? []).map((event) => [`${event.deviceId} ${event.deviceSeq}`, event]));
+  const byId = new Map<string, Seen>((known ?? []).map((event) => [event.id, event]));
+  const takenNumbers = new Set((known ?? []).map(numberOf));
   const lastOfDevice = new Map(head.lastOfDevice);
+  const devices = new Set(lastOfDevice.keys());
   const judged: Judged = { accepted: [], duplicate: [], refused: undefined, flags: [], rows: [], head };
   let { serverSeq, chainHash, state } = head;
 
@@ -52,33 +54,42 @@ export function judgeItems(
     const isLinked =
       envelope.prevHash === (last?.hash ?? GENESIS_HASH) && envelope.deviceSeq > (last?.deviceSeq ?? 0);
     if (!isLinked && known === undefined) throw new NeedsCare();
-    const isNumberTaken = byNumber.has(`${envelope.deviceId} ${envelope.deviceSeq}`);
+    const isNumberTaken = takenNumbers.has(numberOf(envelope));
     const code = refusalOf({ isIdTaken: same !== undefined, isNumberTaken, isLinked });
     if (code) {
       judged.refused = { item, code };
       break;
     }
     serverSeq += 1;
-    chainHash = chainHashOf({
+    const link = {
       previousChainHash: chainHash,
       hash: envelope.hash,
       serverSeq,
       actorId: actor.personId,
       receivedAt: now.getTime(),
-    });
-    const before = { state, devices: new Set(lastOfDevice.keys()), tree: head.tree };
+    };
+    chainHash = chainHashOf(link, hashText);
+    const before = { state, devices, tree: head.tree };
     for (const flag of flagsOf(envelope, item.read, before, actor.role))
       judged.flags.push({ ...flag, eventId: envelope.id });
     state = evolveState(state, envelope, { serverSeq, actorId: actor.personId });
-    lastOfDevice.set(envelope.deviceId, envelope);
-    byId.set(envelope.id, { ...envelope, serverSeq });
-    byNumber.set(`${envelope.deviceId} ${envelope.deviceSeq}`, { ...envelope, serverSeq });
+    const { hash, diagnosisId, deviceId, deviceSeq } = envelope;
+    lastOfDevice.set(deviceId, { hash, deviceSeq });
+    devices.add(deviceId);
+    byId.set(envelope.id, { hash, diagnosisId, serverSeq });
+    takenNumbers.add(numberOf(envelope));
     judged.accepted.push({ id: envelope.id, serverSeq });
     judged.rows.push(rowOf(item, { serverSeq, chainHash, actor, now }));
   }
   judged.head = { serverSeq, chainHash, state, lastOfDevice, tree: head.tree };
   return judged;
 }
+
+/** What is known of an event that may come again. */
+type Seen = Pick<KnownEvent, "hash" | "diagnosisId" | "serverSeq">;
+
+const numberOf = ({ deviceId, deviceSeq }: { deviceId: string; deviceSeq: number }) =>
+  `${deviceId} ${deviceSeq}`;
 
 function refusalOf(facts: {
   isIdTaken: boolean;

@@ -1,6 +1,7 @@
 import type { RejectionCode } from "@emberladder/contract";
-import { canonicalText, envelopeSchema, sha256Hex } from "@emberladder/diagnosis";
+import { canonicalText, envelopeSchema } from "@emberladder/diagnosis";
 import type { Envelope } from "@emberladder/diagnosis";
+import { hashText } from "./hash-text.ts";
 import { readEventBody } from "./judge.ts";
 import type { ReadBody } from "./judge.ts";
 
@@ -35,14 +36,13 @@ export function readItem(raw: unknown, index: number): Item {
     return bad(raw, index, "malformed", `${issue?.path.join(".") ?? ""}: ${issue?.message ?? ""}`);
   }
   const envelope = parsed.data;
-  const { hash, ...unhashed } = envelope;
   let text: string;
   try {
-    text = canonicalText(unhashed);
+    text = canonicalText(envelope);
   } catch {
     return bad(raw, index, "malformed", "The body holds something that JSON cannot carry.");
   }
-  if (sha256Hex(text) !== hash) return bad(raw, index, "wrong-hash");
+  if (hashText(text) !== envelope.hash) return bad(raw, index, "wrong-hash");
   const read = readEventBody(envelope);
   if (read.kind === "malformed") return bad(raw, index, "malformed", read.detail);
   return { index, envelope, text, read };
