@@ -92,10 +92,14 @@ export async function prepareApiProcess(
     },
     printed: () => printed,
     start: async () => {
-      const started = spawn(process.execPath, ["--enable-source-maps", ...nodeArgs, bundle.main], {
-        env: { PATH: process.env["PATH"], TZ: "UTC", NODE_ENV: "production", ...given },
-        stdio: ["ignore", "pipe", "pipe"],
-      });
+      const started = spawn(
+        process.execPath,
+        ["--enable-source-maps", "--max-semi-space-size=32", ...nodeArgs, bundle.main],
+        {
+          env: { PATH: process.env["PATH"], TZ: "UTC", NODE_ENV: "production", ...given },
+          stdio: ["ignore", "pipe", "pipe"],
+        },
+      );
       child = started;
       for (const stream of [started.stdout, started.stderr])
         stream.on("data", (chunk) => (printed += String(chunk)));

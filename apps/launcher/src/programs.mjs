@@ -17,6 +17,9 @@ const sources = {
 
 const bundles = { api: "main.mjs", worker: "worker.mjs", "mail-server": "mail-server.mjs", seed: "seed.mjs" };
 
+// Most of what a request makes is thrown away with it: with more room for it, less time goes into clearing up.
+const roomForShortLived = "--max-semi-space-size=32";
+
 /**
  * Describes one program of the server.
  *
@@ -30,7 +33,7 @@ export function describeProgram(name, { flavour, settings, env }) {
     name,
     args:
       flavour === "built"
-        ? ["--enable-source-maps", join(apiDist, bundles[name])]
+        ? ["--enable-source-maps", roomForShortLived, join(apiDist, bundles[name])]
         : ["--import", "tsx", ...watch, join(root, sources[name])],
     cwd: apiFolder,
     env,

@@ -3,7 +3,7 @@ import { people, sessions } from "@emberladder/db";
 import type { Database } from "@emberladder/db";
 import { DrizzleMySQLAdapter } from "@lucia-auth/adapter-drizzle";
 import type { Adapter, DatabaseSession, DatabaseUser } from "lucia";
-import { findSessionAndPerson } from "./repository.ts";
+import { prepareFindSession } from "./repository.ts";
 
 /** The key under which a session's secret is kept: a copy of the table opens no session. */
 export function hashSessionToken(token: string): string {
@@ -16,15 +16,15 @@ export function hashSessionToken(token: string): string {
  */
 export class HashedSessionAdapter implements Adapter {
   readonly #inner: Adapter;
-  readonly #database: Database;
+  readonly #findSession: ReturnType<typeof prepareFindSession>;
 
   constructor(database: Database) {
-    this.#database = database;
+    this.#findSession = prepareFindSession(database);
     this.#inner = new DrizzleMySQLAdapter(database, sessions, people);
   }
 
   async getSessionAndUser(token: string): Promise<[DatabaseSession | null, DatabaseUser | null]> {
-    const row = await findSessionAndPerson(this.#database, hashSessionToken(token));
+    const row = await this.#findSession(hashSessionToken(token));
     if (!row) return [null, null];
     const { personId, expiresAt, deviceId, createdAt, lastUsedAt, twoStepPassed, ...person } = row;
     return [

@@ -1,7 +1,7 @@
 import type { Role } from "@emberladder/contract";
 import { companies, devices, events, people, sessions, totpUsedSteps, recoveryCodes } from "@emberladder/db";
 import type { Queryable } from "@emberladder/db";
-import { and, desc, eq, gt, isNull, lt, max, ne } from "drizzle-orm";
+import { and, desc, eq, gt, isNull, lt, max, ne, sql } from "drizzle-orm";
 
 /** What sign-in and the account routes know of a person. */
 export interface AccountRow {
@@ -59,9 +59,12 @@ export async function findCompany(db: Queryable, companyId: string) {
   return row;
 }
 
-/** A session with its person by the session's hash: only the columns that every request needs. */
-export async function findSessionAndPerson(db: Queryable, sessionHash: string) {
-  const [row] = await db
+/**
+ * Finds a session with its person by the session's hash: only the columns that every request needs. The query is
+ * put into words once, because every request makes it.
+ */
+export function prepareFindSession(db: Queryable) {
+  const query = db
     .select({
       personId: sessions.userId,
       expiresAt: sessions.expiresAt,
@@ -78,8 +81,12 @@ export async function findSessionAndPerson(db: Queryable, sessionHash: string) {
     })
     .from(sessions)
     .innerJoin(people, eq(people.id, sessions.userId))
-    .where(eq(sessions.id, sessionHash));
-  return row;
+    .where(eq(sessions.id, sql.placeholder("sessionHash")))
+    .prepare();
+  return async (sessionHash: string) => {
+    const [row] = await query.execute({ sessionHash });
+    return row;
+  };
 }
 
 export async function deleteSession(db: Queryable, sessionHash: string): Promise<void> {
