@@ -4,3 +4,4 @@ export * from "./schema/index.ts";
 export * from "./sealed-secret.ts";
 export * from "./shipped-trees.ts";
 export * from "./transaction.ts";
+export { isNothingChanged, writeAtOnce } from "./write-at-once.ts";

@@ -89,9 +89,17 @@ export async function inTransaction<T>(
   work: (transaction: Transaction) => Promise<T>,
   pause: () => number = Math.random,
 ): Promise<T> {
+  return repeatWhereItHelps(async () => runOnce(database, work), pause);
+}
+
+/** Does work again, a few times with a short random pause, where it lost a deadlock or waited too long. */
+export async function repeatWhereItHelps<T>(
+  work: () => Promise<T>,
+  pause: () => number = Math.random,
+): Promise<T> {
   for (let attempt = 1; ; attempt += 1) {
     try {
-      return await runOnce(database, work);
+      return await work();
     } catch (error) {
       const { errno } = readDatabaseError(error) ?? { errno: 0 };
       if (attempt === ATTEMPTS || !REPEATABLE.has(errno)) throw error;

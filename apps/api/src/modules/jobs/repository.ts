@@ -2,26 +2,41 @@ import type { JobKind } from "@emberladder/contract";
 import { inTransaction, jobs } from "@emberladder/db";
 import type { Database, Queryable } from "@emberladder/db";
 import { and, asc, count, desc, eq, inArray, lt, lte, or } from "drizzle-orm";
+import type { SQL } from "drizzle-orm";
 
 export type JobRow = typeof jobs.$inferSelect;
 export type JobState = JobRow["state"];
 
+/** A job as it is asked for. */
+export interface NewJob {
+  id: string;
+  companyId: string | null;
+  kind: JobKind;
+  payload: Record<string, string>;
+  now: Date;
+}
+
 /** Adds work for the worker; in a transaction it stands or falls with what asked for it. */
-export async function enqueueJob(
-  db: Queryable,
-  job: { id: string; companyId: string | null; kind: JobKind; payload: Record<string, string>; now: Date },
-): Promise<void> {
-  await db.insert(jobs).values({
-    id: job.id,
-    companyId: job.companyId,
-    kind: job.kind,
-    payload: job.payload,
-    state: "waiting",
-    attempts: 0,
-    progress: 0,
-    runAfter: job.now,
-    createdAt: job.now,
-  });
+export async function enqueueJob(db: Queryable, job: NewJob): Promise<void> {
+  await db.execute(toEnqueueJob(db, job));
+}
+
+/** The statement that adds work for the worker. */
+export function toEnqueueJob(db: Queryable, job: NewJob): SQL {
+  return db
+    .insert(jobs)
+    .values({
+      id: job.id,
+      companyId: job.companyId,
+      kind: job.kind,
+      payload: job.payload,
+      state: "waiting",
+      attempts: 0,
+      progress: 0,
+      runAfter: job.now,
+      createdAt: job.now,
+    })
+    .getSQL();
 }
 
 /**

@@ -7,8 +7,9 @@ import {
   insertFlags,
   listEventsOf,
   lockDiagnosis,
-  moveCall,
   readStoredEvent,
+  runStatement,
+  toMoveCall,
 } from "#modules/sync/repository.ts";
 import type { DiagnosisRow, EventRow } from "#modules/sync/repository.ts";
 import { replayRecord } from "./replay-record.ts";
@@ -151,6 +152,6 @@ async function settleCall(
 ): Promise<boolean> {
   const call = await findMovableCall(database, callId);
   if (!call || (call.status === status && call.doneAt?.getTime() === doneAt?.getTime())) return false;
-  await moveCall(database, callId, status, doneAt);
+  await runStatement(database, toMoveCall(database, callId, status, doneAt));
   return true;
 }

@@ -1,6 +1,12 @@
 import type { RejectionCode } from "@emberladder/contract";
-import { inTransaction, isReferenceMissing, readDuplicateKey } from "@emberladder/db";
-import type { Transaction } from "@emberladder/db";
+import {
+  inTransaction,
+  isNothingChanged,
+  isReferenceMissing,
+  readDuplicateKey,
+  writeAtOnce,
+} from "@emberladder/db";
+import type { Queryable, Transaction } from "@emberladder/db";
 import { GENESIS_HASH } from "@emberladder/diagnosis";
 import type { Actor } from "#http/actor.ts";
 import type { RequestContext } from "#http/route.ts";
@@ -14,13 +20,14 @@ import type { KeptHead, RecordHead } from "./record-head.ts";
 import {
   areOfCompany,
   findKnownEvents,
-  insertDiagnosis,
-  insertEvents,
-  insertFlags,
   lockDiagnosis,
-  moveHead,
+  runStatement,
+  toInsertDiagnosis,
+  toInsertEvents,
+  toInsertFlags,
+  toMoveHead,
 } from "./repository.ts";
-import type { DiagnosisRow } from "./repository.ts";
+import type { DiagnosisRow, SQL } from "./repository.ts";
 
 type Context = RequestContext<Actor>;
 
@@ -33,53 +40,66 @@ export type GroupVerdict = Pick<Judged, "accepted" | "duplicate" | "refused" | "
 interface Outcome {
   verdict: GroupVerdict;
   keep?: KeptHead;
+  /** What is to be written, the head first; none where nothing is new. */
+  statements?: [SQL, ...SQL[]];
 }
 
 /**
  * Appends the events of one diagnosis in one transaction, as far as they are good.
  *
  * Most batches simply go on from a head that this process committed itself, or open a diagnosis: the quick ways
- * write at once, and the database refuses them where it is not so after all. Whatever is not so simple (another
- * process's head, a repetition, a break, a place of another company) goes the careful way: the row is locked,
- * the record read, and earlier events looked up, to tell which event is which.
+ * write all at once without looking first, and the database refuses them where it is not so after all. Whatever
+ * is not so simple (another process's head, a repetition, a break, a place of another company) goes the careful
+ * way: the row is locked, the record read, and earlier events looked up, to tell which event is which.
  */
 export async function appendGroup(context: Context, items: readonly GoodItem[]): Promise<GroupVerdict> {
   const [first] = items;
   if (!first) throw new Error("A group has at least one event.");
-  const work = (way: (tx: Transaction) => Promise<Outcome>) => inTransaction(context.database, way);
-  const careful = (tx: Transaction) => appendCarefully(tx, context, items, first);
-  const quick = quickWay(context, items, first);
-  let outcome: Outcome;
-  try {
-    outcome = await work(quick ?? careful);
-  } catch (error) {
-    const isUnderstood =
-      error instanceof NeedsCare || readDuplicateKey(error) !== undefined || isReferenceMissing(error);
-    if (!isUnderstood) throw error;
-    outcome = await work(careful);
-  }
+  const { database } = context;
+  const outcome =
+    (await tryQuickly(context, items, first)) ??
+    (await inTransaction(database, async (tx) => appendCarefully(tx, context, items, first)));
   if (outcome.keep) keepHead(first.envelope.diagnosisId, outcome.keep);
   return outcome.verdict;
 }
 
-/** How to write without looking first; undefined where there is nothing to go on from. */
-function quickWay(
+/** The quick ways; undefined where there is nothing to go on from, or where the database knows better. */
+async function tryQuickly(
   context: Context,
   items: readonly GoodItem[],
   first: GoodItem,
-): ((tx: Transaction) => Promise<Outcome>) | undefined {
+): Promise<Outcome | undefined> {
+  const { database } = context;
+  try {
+    const outcome = await planQuickly(context, items, first);
+    if (outcome?.statements) await writeAtOnce(database, outcome.statements);
+    return outcome;
+  } catch (error) {
+    const isUnderstood =
+      error instanceof NeedsCare ||
+      isNothingChanged(error) ||
+      readDuplicateKey(error) !== undefined ||
+      isReferenceMissing(error);
+    if (!isUnderstood) throw error;
+    return undefined;
+  }
+}
+
+async function planQuickly(
+  context: Context,
+  items: readonly GoodItem[],
+  first: GoodItem,
+): Promise<Outcome | undefined> {
+  const { database, actor } = context;
   const kept = findKeptHead(first.envelope.diagnosisId);
-  if (kept && kept.row.companyId === context.actor.companyId) {
+  if (kept && kept.row.companyId === actor.companyId) {
     const { row, head } = kept;
-    return async (tx) =>
-      write(tx, context, { row, head, isNew: false }, judgeItems(items, head, undefined, context));
+    return plan(database, context, { row, head, isNew: false }, judgeItems(items, head, undefined, context));
   }
   const row = newRowOf(context, first);
   if (!row || kept) return undefined;
-  return async (tx) => {
-    const head = await readHead(tx, row, readOpening(first.read)?.tree ?? null);
-    return write(tx, context, { row, head, isNew: true }, judgeItems(items, head, undefined, context));
-  };
+  const head = await readHead(database, row, readOpening(first.read)?.tree ?? null);
+  return plan(database, context, { row, head, isNew: true }, judgeItems(items, head, undefined, context));
 }
 
 async function appendCarefully(
@@ -99,7 +119,10 @@ async function appendCarefully(
     tx,
     items.map(({ envelope }) => envelope),
   );
-  return write(tx, context, { row, head, isNew: !existing }, judgeItems(items, head, known, context));
+  const judged = judgeItems(items, head, known, context);
+  const outcome = await plan(tx, context, { row, head, isNew: !existing }, judged);
+  for (const statement of outcome.statements ?? []) await runStatement(tx, statement);
+  return outcome;
 }
 
 function refuseAll(item: GoodItem, code: RejectionCode): Outcome {
@@ -135,9 +158,9 @@ function newRowOf(
   };
 }
 
-/** Writes what was judged new: the head moved on, the events, their flags, and what follows from them. */
-async function write(
-  tx: Transaction,
+/** What there is to write for what was judged new: the head moved on, the events, their flags, what follows. */
+async function plan(
+  db: Queryable,
   context: Context,
   { row, head, isNew }: { row: DiagnosisRow; head: RecordHead; isNew: boolean },
   judged: Judged,
@@ -145,28 +168,33 @@ async function write(
   const { accepted, duplicate, refused, flags, rows } = judged;
   const verdict = { accepted, duplicate, refused, flags, head: judged.head.serverSeq };
   if (rows.length === 0) return { verdict };
-  const change = await projectRow(tx, context, { row, before: head, judged });
-  if (isNew) await insertDiagnosis(tx, { ...row, ...change, flags: flags.length });
-  else if (!(await moveHead(tx, head, row.id, { ...change, newFlags: flags.length }))) throw new NeedsCare();
-  await insertEvents(tx, rows);
-  await insertFlags(
-    tx,
-    flags.map(({ eventId, rule, params }) => ({
-      id: context.newId(),
-      companyId: row.companyId,
-      diagnosisId: row.id,
-      eventId,
-      rule,
-      params: params ? JSON.stringify(params) : null,
-      createdAt: context.now,
-    })),
-  );
-  await followUp(tx, context, {
+  const change = await projectRow(db, context, { row, before: head, judged });
+  const flagRows = flags.map(({ eventId, rule, params }) => ({
+    id: context.newId(),
+    companyId: row.companyId,
+    diagnosisId: row.id,
+    eventId,
+    rule,
+    params: params ? JSON.stringify(params) : null,
+    createdAt: context.now,
+  }));
+  const facts = {
     row,
     before: head,
     after: judged.head,
     isNew,
     mustWait: change.waitsForRelease === true,
-  });
-  return { verdict, keep: { row: { ...row, ...change }, head: judged.head } };
+  };
+  return {
+    verdict,
+    keep: { row: { ...row, ...change }, head: judged.head },
+    statements: [
+      isNew
+        ? toInsertDiagnosis(db, { ...row, ...change, flags: flags.length })
+        : toMoveHead(db, head, row.id, { ...change, newFlags: flags.length }),
+      toInsertEvents(db, rows),
+      ...(flagRows.length > 0 ? [toInsertFlags(db, flagRows)] : []),
+      ...followUp(db, context, facts),
+    ],
+  };
 }

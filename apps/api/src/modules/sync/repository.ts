@@ -4,9 +4,12 @@ import type { UnitProfile } from "@emberladder/furnace";
 import { envelopeSchema } from "@emberladder/diagnosis";
 import type { StoredEvent, UnhashedEnvelope } from "@emberladder/diagnosis";
 import { and, asc, eq, gt, inArray, isNull, ne, or, sql } from "drizzle-orm";
+import type { SQL } from "drizzle-orm";
 
 const storedTextSchema = envelopeSchema.omit({ hash: true });
 
+/** A statement that is put into words and not yet run. */
+export type { SQL } from "drizzle-orm";
 export type DiagnosisRow = typeof diagnoses.$inferSelect;
 export type EventRow = typeof events.$inferSelect;
 export type NoteRow = typeof noteTexts.$inferSelect;
@@ -36,42 +39,56 @@ export async function areOfCompany(
   return call !== undefined && unit !== undefined;
 }
 
-export async function insertDiagnosis(db: Queryable, row: typeof diagnoses.$inferInsert): Promise<void> {
-  await db.insert(diagnoses).values(row);
+export function toInsertDiagnosis(db: Queryable, row: typeof diagnoses.$inferInsert): SQL {
+  return db.insert(diagnoses).values(row).getSQL();
 }
 
 /**
- * Moves the head of a diagnosis on, if it is still where the caller believes; false when somebody else moved
- * it. The row stays locked until the transaction ends.
+ * The statement that moves the head of a diagnosis on, if it is still where the caller believes; it changes no
+ * row when somebody else moved it. The row stays locked until the transaction ends.
  */
-export async function moveHead(
+export function toMoveHead(
   db: Queryable,
   from: { serverSeq: number; chainHash: string },
   diagnosisId: string,
   { newFlags, ...change }: Partial<Omit<DiagnosisRow, "flags">> & { newFlags: number },
-): Promise<boolean> {
-  const [result] = await db
-    .update(diagnoses)
-    // Counted on in the database: what this process remembers of the count may be old.
-    .set(newFlags === 0 ? change : { ...change, flags: sql`${diagnoses.flags} + ${newFlags}` })
-    .where(
-      and(
-        eq(diagnoses.id, diagnosisId),
-        eq(diagnoses.serverSeq, from.serverSeq),
-        eq(diagnoses.chainHash, from.chainHash),
-      ),
-    );
-  return result.affectedRows === 1;
+): SQL {
+  return (
+    db
+      .update(diagnoses)
+      // Counted on in the database: what this process remembers of the count may be old.
+      .set(newFlags === 0 ? change : { ...change, flags: sql`${diagnoses.flags} + ${newFlags}` })
+      .where(
+        and(
+          eq(diagnoses.id, diagnosisId),
+          eq(diagnoses.serverSeq, from.serverSeq),
+          eq(diagnoses.chainHash, from.chainHash),
+        ),
+      )
+      .getSQL()
+  );
 }
 
 export type NewEventRow = typeof events.$inferInsert;
 
-export async function insertEvents(db: Queryable, rows: NewEventRow[]): Promise<void> {
-  await db.insert(events).values(rows);
+export function toInsertEvents(db: Queryable, rows: NewEventRow[]): SQL {
+  return db.insert(events).values(rows).getSQL();
 }
 
-export async function insertFlags(db: Queryable, rows: (typeof eventFlags.$inferInsert)[]): Promise<void> {
-  if (rows.length > 0) await db.insert(eventFlags).values(rows);
+export type NewFlagRow = typeof eventFlags.$inferInsert;
+
+export function toInsertFlags(db: Queryable, rows: NewFlagRow[]): SQL {
+  return db.insert(eventFlags).values(rows).getSQL();
+}
+
+export async function insertFlags(db: Queryable, rows: NewFlagRow[]): Promise<void> {
+  if (rows.length > 0) await db.execute(toInsertFlags(db, rows));
+}
+
+/** Runs a statement and tells how many rows it found. */
+export async function runStatement(db: Queryable, statement: SQL): Promise<number> {
+  const [result] = await db.execute(statement);
+  return (result as unknown as { affectedRows: number }).affectedRows;
 }
 
 export async function listFlagRules(db: Queryable, diagnosisId: string): Promise<string[]> {
@@ -236,28 +253,30 @@ export async function listNotesOf(
     .where(and(eq(noteTexts.companyId, companyId), inArray(noteTexts.diagnosisId, diagnosisIds)));
 }
 
-/** Moves a call with its diagnosis: under way while one is open, done once it is closed. */
-export async function moveCall(
+/** The statement that moves a call with its diagnosis: under way while one is open, done once it is closed. */
+export function toMoveCall(
   db: Queryable,
   callId: string,
   status: "under-way" | "done",
   doneAt: Date | null,
-): Promise<void> {
-  await db
+): SQL {
+  return db
     .update(calls)
     .set({ status, doneAt })
-    .where(and(eq(calls.id, callId), ne(calls.status, "cancelled")));
+    .where(and(eq(calls.id, callId), ne(calls.status, "cancelled")))
+    .getSQL();
 }
 
-/** Puts a profile that was corrected on site in force. */
-export async function replaceProfile(
+/** The statement that puts a profile in force which was corrected on site. */
+export function toReplaceProfile(
   db: Queryable,
   companyId: string,
   unitId: string,
   profile: UnitProfile,
-): Promise<void> {
-  await db
+): SQL {
+  return db
     .update(units)
     .set({ profile, version: sql`${units.version} + 1` })
-    .where(and(eq(units.companyId, companyId), eq(units.id, unitId)));
+    .where(and(eq(units.companyId, companyId), eq(units.id, unitId)))
+    .getSQL();
 }
