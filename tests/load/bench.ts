@@ -41,7 +41,7 @@ const CASES: readonly Case[] = [
   { name: "one event, 1 connection", bound: 0.5, connections: 1, batch: 1, visits: 6 },
   { name: "one event, 16 connections", bound: 0.3, connections: 16, batch: 1, visits: 2 },
 ];
-const TURNS = Number(process.env["BENCH_TURNS"] ?? 7);
+const TURNS = Number(process.env["BENCH_TURNS"] ?? 9);
 const [only] = process.argv.slice(2);
 
 type Phone = Sender & { cookie: string };
