@@ -192,7 +192,13 @@ async function plan(
       isNew
         ? toInsertDiagnosis(db, { ...row, ...change, flags: flags.length })
         : toMoveHead(db, head, row.id, { ...change, newFlags: flags.length }),
-      toInsertEvents(db, rows),
+      toInsertEvents({
+        companyId: row.companyId,
+        diagnosisId: row.id,
+        actorId: context.actor.personId,
+        receivedAt: context.now,
+        rows,
+      }),
       ...(flagRows.length > 0 ? [toInsertFlags(db, flagRows)] : []),
       ...followUp(db, context, facts),
     ],

@@ -79,7 +79,7 @@ export function judgeItems(
     byId.set(envelope.id, { hash, diagnosisId, serverSeq });
     takenNumbers.add(numberOf(envelope));
     judged.accepted.push({ id: envelope.id, serverSeq });
-    judged.rows.push(rowOf(item, { serverSeq, chainHash, actor, now }));
+    judged.rows.push(rowOf(item, { serverSeq, chainHash }));
   }
   judged.head = { serverSeq, chainHash, state, lastOfDevice, tree: head.tree };
   return judged;
@@ -103,22 +103,18 @@ function refusalOf(facts: {
 
 function rowOf(
   { envelope, text }: GoodItem,
-  stamp: { serverSeq: number; chainHash: string; actor: Actor; now: Date },
+  { serverSeq, chainHash }: { serverSeq: number; chainHash: string },
 ): NewEventRow {
   return {
     id: envelope.id,
-    companyId: stamp.actor.companyId,
-    diagnosisId: envelope.diagnosisId,
     deviceId: envelope.deviceId,
     deviceSeq: envelope.deviceSeq,
-    serverSeq: stamp.serverSeq,
+    serverSeq,
     type: envelope.type,
     schemaVersion: envelope.schemaVersion,
     canonicalText: text,
     hash: envelope.hash,
     prevHash: envelope.prevHash,
-    chainHash: stamp.chainHash,
-    actorId: stamp.actor.personId,
-    receivedAt: stamp.now,
+    chainHash,
   };
 }

@@ -44,9 +44,10 @@ export function findKeptHead(diagnosisId: string): KeptHead | undefined {
   return kept.get(diagnosisId);
 }
 
-/** Keeps a head that was committed. */
+/** Keeps a head that was committed, until its report is asked for: hardly anything follows then. */
 export function keepHead(diagnosisId: string, entry: KeptHead): void {
   kept.delete(diagnosisId);
+  if (entry.head.state.closed && entry.head.state.report) return;
   kept.set(diagnosisId, entry);
   const oldest = kept.size > MOST_HEADS ? kept.keys().next().value : undefined;
   if (oldest !== undefined) kept.delete(oldest);

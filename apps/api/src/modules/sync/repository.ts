@@ -69,10 +69,53 @@ export function toMoveHead(
   );
 }
 
-export type NewEventRow = typeof events.$inferInsert;
+/** What an event's row has by itself, and what all rows of one batch have in common. */
+export interface NewEvents {
+  companyId: string;
+  diagnosisId: string;
+  actorId: string;
+  receivedAt: Date;
+  rows: NewEventRow[];
+}
+export type NewEventRow = Omit<
+  typeof events.$inferInsert,
+  "companyId" | "diagnosisId" | "actorId" | "receivedAt"
+>;
 
-export function toInsertEvents(db: Queryable, rows: NewEventRow[]): SQL {
-  return db.insert(events).values(rows).getSQL();
+/**
+ * The statement that adds events. The rows travel as one value, JSON, which the server takes apart: with fifty
+ * events that is several times as quick to put together as seven hundred values.
+ */
+export function toInsertEvents({ companyId, diagnosisId, actorId, receivedAt, rows }: NewEvents): SQL {
+  const values = rows.map((row) => [
+    row.id,
+    row.deviceId,
+    row.deviceSeq,
+    row.serverSeq,
+    row.type,
+    row.schemaVersion,
+    row.canonicalText,
+    row.hash,
+    row.prevHash,
+    row.chainHash,
+  ]);
+  return sql`insert into events
+    (id, company_id, diagnosis_id, device_id, device_seq, server_seq, type, schema_version,
+     canonical_text, hash, prev_hash, chain_hash, actor_id, received_at)
+    select id, ${companyId}, ${diagnosisId}, device_id, device_seq, server_seq, type, schema_version,
+           canonical_text, hash, prev_hash, chain_hash, ${actorId}, ${sql.param(receivedAt, events.receivedAt)}
+    from json_table(${JSON.stringify(values)}, '$[*]' columns (
+      id char(36) path '$[0]',
+      device_id char(36) path '$[1]',
+      device_seq bigint path '$[2]',
+      server_seq int path '$[3]',
+      type varchar(64) path '$[4]',
+      schema_version int path '$[5]',
+      canonical_text mediumtext character set utf8mb4 collate utf8mb4_bin path '$[6]',
+      hash char(64) path '$[7]',
+      prev_hash char(64) path '$[8]',
+      chain_hash char(64) path '$[9]'
+    )) as sent`;
 }
 
 export type NewFlagRow = typeof eventFlags.$inferInsert;
